@@ -15,6 +15,7 @@ internal static class Compiler
         {
             Operand o => Tree.ArrayIndex(values, Tree.Constant(IndexOf(o))),
             Constant c => Tree.Constant(c.Value),
+            Zero => Tree.Constant(0.0),
             Binary { Sign: '+' } b => Tree.Add(Visit(b.Left), Visit(b.Right)),
             Binary { Sign: '−' } b => Tree.Subtract(Visit(b.Left), Visit(b.Right)),
             Binary { Sign: '·' } b => Tree.Multiply(Visit(b.Left), Visit(b.Right)),

@@ -63,6 +63,8 @@ public abstract record Expression
     public static Expression Larger(Expression a, Expression b) => new Extreme(true, a, b);
     /// <summary>The smaller of two values.</summary>
     public static Expression Smaller(Expression a, Expression b) => new Extreme(false, a, b);
+    /// <summary>The value where it is above zero, else zero.</summary>
+    public static Expression Positive(Expression value, Quantity quantity) => new Extreme(true, new Zero(quantity), value);
     /// <summary>Sum over the repeated last operand of a formula.</summary>
     public static Expression Total(Operand each) => new Aggregate(AggregateKind.Total, each);
     /// <summary>Largest of the repeated last operand of a formula.</summary>
@@ -86,6 +88,9 @@ public sealed record Operand(string Symbol, string Meaning, Quantity Quantity) :
 
 /// <summary>A plain number written in a formula.</summary>
 public sealed record Constant(double Value) : Expression(Dimension.None);
+
+/// <summary>Nothing at all of a kind that has a dimension, for "the larger of nothing and …".</summary>
+public sealed record Zero(Quantity Quantity) : Expression(Quantity.Dimension);
 
 /// <summary>Sum, difference, product or quotient.</summary>
 public sealed record Binary(char Sign, Expression Left, Expression Right)
