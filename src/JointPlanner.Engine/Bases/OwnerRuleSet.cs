@@ -42,6 +42,12 @@ public sealed record FixedReference(double Temperature, double? Opening) : Setti
 /// <summary>The middle of the family's service limits at mid temperature, carried by the thermal slope and half the irreversible movement.</summary>
 public sealed record MidRange : SettingRule;
 
+/// <summary>
+/// Linear between the size's greatest opening at the lowest temperature and its least at the highest, so that the whole working range
+/// is spread over the range of temperature.
+/// </summary>
+public sealed record RangeShare : SettingRule;
+
 /// <summary>Sizes and limits of one joint family, as data.</summary>
 public sealed record FamilyRules
 {
@@ -51,6 +57,10 @@ public sealed record FamilyRules
     public required Provenance Source { get; init; }
     /// <summary>Figures that hold for all sizes: word → value in SI. The family says which words it asks for.</summary>
     public ImmutableSortedDictionary<string, double> Figures { get; init; } = ImmutableSortedDictionary<string, double>.Empty;
+    /// <summary>What is said about single figures beyond their value: word → note.</summary>
+    public ImmutableSortedDictionary<string, FigureNote> Notes { get; init; } = ImmutableSortedDictionary<string, FigureNote>.Empty;
+    /// <summary>True where these limits stand in for the code's general bounds on the gap, false where both hold.</summary>
+    public bool ReplacesCodeLimits { get; init; }
     /// <summary>Sizes from small to large.</summary>
     public ImmutableArray<FamilySize> Sizes { get; init; } = [];
 }
@@ -59,3 +69,9 @@ public sealed record FamilyRules
 /// <param name="Name">Name as it is ordered by, in generic terms.</param>
 /// <param name="Figures">Figures of this size: word → value in SI; they cover those of the family.</param>
 public sealed record FamilySize(string Name, ImmutableSortedDictionary<string, double> Figures);
+
+/// <summary>What a rule set says about one figure beyond its value; what it leaves open the family decides.</summary>
+/// <param name="JudgedBy">Column of the counting table whose movements are set against the figure; null for the family's own.</param>
+/// <param name="Measure">Direction in which the figure is measured; null for the family's own.</param>
+/// <param name="Source">Where the figure comes from; null for the source of the family's rules.</param>
+public sealed record FigureNote(Column? JudgedBy = null, Measure? Measure = null, Provenance? Source = null);
