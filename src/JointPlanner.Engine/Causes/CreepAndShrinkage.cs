@@ -1,0 +1,88 @@
+using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Plans;
+using static JointPlanner.Engine.Formulas.Expression;
+
+namespace JointPlanner.Engine.Causes;
+
+/// <summary>Shortening of the deck that is still to come after a setting state, from a strain and its development as the designer gives them.</summary>
+public static class CreepAndShrinkage
+{
+    private static readonly Operand Strain = new("ε", "strain at the end of life, shortening positive", Quantity.Strain);
+    private static readonly Operand Share = new("s", "share of it over at setting", Quantity.Ratio);
+    private static readonly Operand Remaining = new("ε_r", "strain still to come after setting", Quantity.Strain);
+    private static readonly Operand Length = new("L", "expansion length of the joint for this segment", Quantity.Length);
+    private static readonly Operand Age = new("t", "deck age at setting", Quantity.Age);
+    private static readonly Operand Before = new("t_1", "age before it in the given development", Quantity.Age);
+    private static readonly Operand After = new("t_2", "age after it", Quantity.Age);
+    private static readonly Operand ShareBefore = new("s_1", "share over at the age before", Quantity.Ratio);
+    private static readonly Operand ShareAfter = new("s_2", "share over at the age after", Quantity.Ratio);
+    private static readonly Operand Part = new("Δ_j", "part of one segment", Quantity.Movement);
+
+    private static readonly Provenance OneCurve = Provenance.Derived("what is still to come is the difference of one curve from setting to the end of life");
+
+    /// <summary>Share over at an age between two given points.</summary>
+    public static readonly Formula ShareOver = new(
+        "shortening.share-over", "s", "share of the shortening over at setting, linear between the given ages", Quantity.Ratio,
+        [ShareBefore, ShareAfter, Age, Before, After],
+        ShareBefore + (ShareAfter - ShareBefore) * (Age - Before) / (After - Before), OneCurve,
+        new(0.4, 1e-12, "own arithmetic", 0.2, 0.6, 50 * 86400, 0, 100 * 86400));
+
+    /// <summary>Strain still to come.</summary>
+    public static readonly Formula StillToCome = new(
+        "shortening.still-to-come", "ε_r", "strain still to come after setting", Quantity.Strain, [Strain, Share],
+        Strain * (1 - Share), OneCurve, new(160e-6, 1e-9, "own arithmetic", 200e-6, 0.2));
+
+    /// <summary>How far the shortening of one segment opens a joint.</summary>
+    public static readonly Formula Opens = new(
+        "shortening.opens", "Δ_j", "opening by the shortening of one segment", Quantity.Movement, [Remaining, Length],
+        Positive(Remaining * Length, Quantity.Movement), OneCurve, new(0.0048768, 1e-7,
+            "from memory, check against the licensed text: WSDOT BDM 9.1.3, 0.192 in before rounding", 160e-6, 30.48));
+
+    /// <summary>How far the shortening of one segment closes a joint whose face it pulls toward the other.</summary>
+    public static readonly Formula Closes = new(
+        "shortening.closes", "Δ_j", "closing by the shortening of one segment", Quantity.Movement, [Remaining, Length],
+        Positive(-1 * (Remaining * Length), Quantity.Movement), OneCurve, new(0.001, 1e-9, "own arithmetic", 100e-6, -10));
+
+    /// <summary>All segments that open.</summary>
+    public static readonly Formula SumOpens = new(
+        "shortening.opens-by", "Δ_opens", "the joint opens by shortening still to come", Quantity.Movement, [Part], Total(Part),
+        Provenance.Derived("opening parts count in opening only"), new(0.03, 1e-12, "own arithmetic", 0.01, 0.02));
+
+    /// <summary>All segments that close.</summary>
+    public static readonly Formula SumCloses = new(
+        "shortening.closes-by", "Δ_closes", "the joint closes by shortening still to come", Quantity.Movement, [Part], Total(Part),
+        Provenance.Derived("closing parts count in closing only"), new(0.03, 1e-12, "own arithmetic", 0.01, 0.02));
+
+    /// <summary>Strain still to come after a deck age, as steps.</summary>
+    /// <param name="path">Path of the shortening in the plan.</param>
+    /// <param name="name">What it is called in the steps: creep or shrinkage.</param>
+    /// <param name="shortening">Strain and development.</param>
+    /// <param name="age">Deck age at the setting state, s.</param>
+    /// <param name="derivation">Where the steps go.</param>
+    public static Number RemainingStrain(string path, string name, Shortening shortening, Number age, Derivation derivation)
+    {
+        var strain = derivation.Given($"{path}/strain", "ε", $"{name} strain at the end of life", Quantity.Strain, shortening.Strain, shortening.Source);
+        return derivation.Use(StillToCome, "", strain, ShareAt(path, name, shortening, age, derivation));
+    }
+
+    private static Number ShareAt(string path, string name, Shortening shortening, Number age, Derivation derivation)
+    {
+        var points = shortening.Development;
+        if (points.IsEmpty)
+            return derivation.Given($"{path}/development", "s", $"share of the {name} over at setting: none given, all of it still to come",
+                Quantity.Ratio, 0, "", true);
+        var next = points.ToList().FindIndex(p => p.Age >= age.Value);
+        if (next < 0)
+            return ShareOf(points.Length - 1);
+        var (before, shareBefore) = next == 0
+            ? (derivation.Given($"{path}/development/start/age", "t_1", "start of the development", Quantity.Age, 0),
+               derivation.Given($"{path}/development/start/share", "s_1", "nothing is over at the start", Quantity.Ratio, 0))
+            : (AgeOf(next - 1), ShareOf(next - 1));
+        return points[next].Age <= before.Value
+            ? ShareOf(next)
+            : derivation.Use(ShareOver, "", shareBefore, ShareOf(next), age, before, AgeOf(next));
+
+        Number AgeOf(int i) => derivation.Given($"{path}/development/{i}/age", "t", $"age in the development of {name}", Quantity.Age, points[i].Age);
+        Number ShareOf(int i) => derivation.Given($"{path}/development/{i}/share", "s", $"share of {name} over at that age", Quantity.Ratio, points[i].Share);
+    }
+}

@@ -1,0 +1,27 @@
+using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Plans;
+
+namespace JointPlanner.Engine.Frames;
+
+/// <summary>Where each segment stands still while the whole deck warms.</summary>
+public static class ZeroMovementPoints
+{
+    /// <summary>Station of the point of a segment that does not move; null where every point of it moves.</summary>
+    /// <param name="segment">The segment.</param>
+    /// <param name="lengths">The solved model.</param>
+    /// <param name="expansionOf">Coefficient of expansion of each segment, 1/K.</param>
+    /// <param name="derivation">Where the step goes.</param>
+    public static Number? Of(Segment segment, ExpansionLengths lengths, Func<string, double> expansionOf, Derivation derivation)
+    {
+        var warmed = lengths.Solver.Strained(expansionOf);
+        foreach (var member in lengths.Deck.Model.Members.Where(m => m.Segment == segment.Id))
+        {
+            var (from, to) = (warmed.Of(member.From), warmed.Of(member.To));
+            if (from * to > 0 || from == to) continue;
+            var station = member.From.Station + (member.Length * from / (from - to));
+            return derivation.Solved(Keys.ZeroMovementPoint(segment.Id), "x_0", $"zero-movement point of segment {segment.Id} while the deck warms",
+                Quantity.Length, station, "axial model of the deck", warmed.Residual, [.. lengths.Deck.Inputs]);
+        }
+        return null;
+    }
+}
