@@ -1,0 +1,39 @@
+using JointPlanner.Web.Shell;
+using JointPlanner.Web.Start;
+using MudBlazor.Services;
+
+var builder = WebApplication.CreateBuilder(args);
+var refusals = Refusals.Before(builder.Configuration, builder.Environment);
+if (refusals.Count > 0)
+{
+    foreach (var refusal in refusals) Console.Error.WriteLine($"Joint Planner does not start: {refusal}");
+    return 3;
+}
+
+builder.WebHost.ConfigureKestrel(kestrel => kestrel.Limits.MaxRequestBodySize = 1 << 20);
+builder.Services.AddRazorComponents().AddInteractiveServerComponents(Circuits.Configure);
+builder.Services.AddMudServices();
+builder.Services.AddHealthChecks();
+builder.Services.AddHttpContextAccessor();
+builder.Services.AddCascadingAuthenticationState();
+builder.Services.AddScoped<Preferences>();
+builder.Services.AddSingleton(DemoMode.From(builder.Configuration));
+builder.AddTrustedProxies();
+
+var app = builder.Build();
+
+app.UseForwardedHeaders();
+app.UseMiddleware<SecurityHeaders>();
+if (!app.Environment.IsDevelopment())
+{
+    app.UseExceptionHandler("/error", createScopeForErrors: true);
+    app.UseHsts();
+}
+
+app.UseStatusCodePagesWithReExecute("/status/{0}");
+app.UseAntiforgery();
+app.MapStaticAssets();
+app.MapHealthChecks("/health");
+app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
+app.Run();
+return 0;

@@ -1,0 +1,52 @@
+namespace JointPlanner.Web.Shell;
+
+/// <summary>In which units numbers are shown; what was typed stays as typed.</summary>
+public enum UnitProfile
+{
+    /// <summary>Metres, millimetres, °C.</summary>
+    Metric,
+    /// <summary>Feet, inches, °F.</summary>
+    Us,
+}
+
+/// <summary>What a browser remembers of a person's choices, as it goes from the page to the circuit.</summary>
+/// <param name="IsDark">Dark paper.</param>
+/// <param name="Units">Units shown.</param>
+public sealed record RememberedPreferences(bool IsDark, UnitProfile Units)
+{
+    internal const string PaperCookie = "paper";
+    internal const string UnitsCookie = "units";
+
+    internal static RememberedPreferences From(IRequestCookieCollection cookies) =>
+        new(cookies[PaperCookie] == "dark", cookies[UnitsCookie] == "us" ? UnitProfile.Us : UnitProfile.Metric);
+}
+
+/// <summary>The choices that hold in one circuit; whoever shows numbers listens for a change.</summary>
+public sealed class Preferences
+{
+    /// <summary>Dark paper.</summary>
+    public bool IsDark { get; private set; }
+
+    /// <summary>Units shown.</summary>
+    public UnitProfile Units { get; private set; }
+
+    /// <summary>Told after each change.</summary>
+    public event Action? Changed;
+
+    /// <summary>Takes what the browser remembered.</summary>
+    public void Take(RememberedPreferences remembered) => (IsDark, Units) = (remembered.IsDark, remembered.Units);
+
+    /// <summary>Chooses light or dark paper.</summary>
+    public void Choose(bool isDark)
+    {
+        IsDark = isDark;
+        Changed?.Invoke();
+    }
+
+    /// <summary>Chooses the units shown.</summary>
+    public void Choose(UnitProfile units)
+    {
+        Units = units;
+        Changed?.Invoke();
+    }
+}

@@ -1,0 +1,28 @@
+using Microsoft.AspNetCore.Components;
+using Microsoft.JSInterop;
+
+namespace JointPlanner.Web.Shell;
+
+/// <summary>Name, rooms, units, paper, person.</summary>
+public sealed partial class TopBar
+{
+    [Inject]
+    private Preferences Preferences { get; set; } = null!;
+
+    [Inject]
+    private IJSRuntime Script { get; set; } = null!;
+
+    private string Pressed(UnitProfile units) => Preferences.Units == units ? "true" : "false";
+
+    private async Task Show(UnitProfile units)
+    {
+        Preferences.Choose(units);
+        await Script.InvokeVoidAsync("jointPlanner.remember", RememberedPreferences.UnitsCookie, units == UnitProfile.Us ? "us" : "metric");
+    }
+
+    private async Task TurnPaper()
+    {
+        Preferences.Choose(!Preferences.IsDark);
+        await Script.InvokeVoidAsync("jointPlanner.paper", Preferences.IsDark ? "dark" : "light");
+    }
+}

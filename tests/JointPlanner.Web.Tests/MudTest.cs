@@ -1,0 +1,25 @@
+using Bunit;
+using JointPlanner.Web.Shell;
+using Microsoft.Extensions.DependencyInjection;
+using MudBlazor.Services;
+
+namespace JointPlanner.Web.Tests;
+
+/// <summary>A component test with the component library's services; it disposes asynchronously because some of them must be.</summary>
+public abstract class MudTest : BunitContext, IAsyncLifetime
+{
+    protected MudTest()
+    {
+        JSInterop.Mode = JSRuntimeMode.Loose;
+        Services.AddMudServices(options => options.PopoverOptions.CheckForPopoverProvider = false);
+        Services.AddScoped<Preferences>();
+    }
+
+    public ValueTask InitializeAsync() => ValueTask.CompletedTask;
+
+    public new async ValueTask DisposeAsync()
+    {
+        await base.DisposeAsync();
+        GC.SuppressFinalize(this);
+    }
+}
