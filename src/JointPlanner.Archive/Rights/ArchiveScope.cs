@@ -1,0 +1,3 @@
+namespace JointPlanner.Archive.Rights;
+
+public sealed class ArchiveScope;
