@@ -12,14 +12,20 @@ public sealed class DeckModel
 {
     private readonly Dictionary<(string Body, double Station), Node> nodes;
 
-    private DeckModel(AxialModel model, Dictionary<(string, double), Node> nodes, ImmutableArray<Number> inputs) =>
-        (Model, this.nodes, Inputs) = (model, nodes, inputs);
+    private readonly Dictionary<string, Number> stiffnesses;
+
+    private DeckModel(
+        AxialModel model, Dictionary<(string, double), Node> nodes, Dictionary<string, Number> stiffnesses, ImmutableArray<Number> inputs) =>
+        (Model, this.nodes, this.stiffnesses, Inputs) = (model, nodes, stiffnesses, inputs);
 
     /// <summary>The model.</summary>
     public AxialModel Model { get; }
 
     /// <summary>Steps that the model was built from.</summary>
     public ImmutableArray<Number> Inputs { get; }
+
+    /// <summary>Stiffness of a support or an elastomeric line by id; null where it does not yield or has none.</summary>
+    public Number? StiffnessOf(string id) => stiffnesses.TryGetValue(id, out var k) ? k : null;
 
     /// <summary>The deck's node at a station.</summary>
     public Node DeckAt(string segment, double station) => nodes[(segment, station)];
@@ -35,14 +41,14 @@ public sealed class DeckModel
         foreach (var bearing in plan.Bearings.Where(b => b.Kind == BearingKind.Fixed))
             tied.Tie(AboveOf(bearing), BelowOf(plan, bearing));
 
-        var inputs = new List<Number>();
+        var stiffnesses = new Dictionary<string, Number>();
         var springs = new List<(string Name, (string, double) From, (string, double)? To, double Stiffness)>();
         foreach (var support in plan.Supports)
         {
             var place = (support.Id, support.Station);
             if (SupportStiffnesses.Of(support, plan, derivation) is { } k)
             {
-                inputs.Add(k);
+                stiffnesses[support.Id] = k;
                 springs.Add((support.Id, place, null, k.Value));
             }
             else tied.Hold(place);
@@ -50,11 +56,12 @@ public sealed class DeckModel
         foreach (var bearing in plan.Bearings.Where(b => b.Kind == BearingKind.Elastomeric))
         {
             var k = BearingStiffnesses.Of(bearing, derivation);
-            inputs.Add(k);
+            stiffnesses[bearing.Id] = k;
             springs.Add((bearing.Id, AboveOf(bearing), BelowOf(plan, bearing), k.Value));
         }
 
         var nodes = Number(places, tied);
+        var inputs = stiffnesses.Values.ToList();
         var members = new List<Member>();
         foreach (var segment in plan.Segments)
         {
@@ -67,7 +74,7 @@ public sealed class DeckModel
             [.. nodes.Values], [.. members],
             [.. springs.Select(s => new Spring(s.Name, nodes[s.From], s.To is { } to ? nodes[to] : null, s.Stiffness))],
             nodes.Values.Select(n => n.Unknown).DefaultIfEmpty(-1).Max() + 1);
-        return new DeckModel(model, nodes, [.. inputs]);
+        return new DeckModel(model, nodes, stiffnesses, [.. inputs]);
     }
 
     private static (string, double) AboveOf(BearingLine b) => (b.Segment, b.Station);

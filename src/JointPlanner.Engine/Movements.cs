@@ -1,0 +1,86 @@
+using System.Collections.Immutable;
+using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Climates;
+using JointPlanner.Engine.Combining;
+using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Frames;
+using JointPlanner.Engine.HandChecks;
+using JointPlanner.Engine.Plans;
+
+namespace JointPlanner.Engine;
+
+/// <summary>The main path, top to bottom: an accepted plan, a basis and an owner's rules become movements, fits and setting tables.</summary>
+public sealed class Movements
+{
+    private readonly Plan plan;
+    private readonly CodeBasis basis;
+    private readonly OwnerRuleSet? rules;
+    private readonly Derivation derivation = new();
+
+    private Movements(Plan plan, CodeBasis basis, OwnerRuleSet? rules) => (this.plan, this.basis, this.rules) = (plan, basis, rules);
+
+    /// <summary>Computes a plan. What stands in the way is a finding of the result, never an exception.</summary>
+    /// <param name="plan">An accepted plan.</param>
+    /// <param name="basis">The code edition.</param>
+    /// <param name="rules">The owner's rule set; null for none, and then nothing is fitted.</param>
+    /// <param name="cancellation">Stops between joints.</param>
+    public static Result Of(Plan plan, CodeBasis basis, OwnerRuleSet? rules, CancellationToken cancellation = default)
+    {
+        var movements = new Movements(plan, basis, rules);
+        var counting = CountingLayers.Of(plan, basis, rules);
+        try
+        {
+            return movements.Compute(counting, cancellation);
+        }
+        catch (SilentBasisException silent)
+        {
+            movements.derivation.Note(silent.Finding);
+        }
+        catch (MechanismException free)
+        {
+            movements.derivation.Note(new("not-held", Severity.Error, "bearings",
+                $"The deck can move along its axis at {free.Node.Name} without resistance: nothing but sliding bearings holds it there. Fix one line or give it pads."));
+        }
+        catch (NotFiniteException broken)
+        {
+            movements.derivation.Note(new("not-finite", Severity.Error, "", broken.Message));
+        }
+        return movements.Unfinished(counting);
+    }
+
+    private Result Compute(CountingTable counting, CancellationToken cancellation)
+    {
+        var temperatures = plan.Segments.ToImmutableDictionary(s => s.Id, s => DeckTemperatures.Of(s, plan, basis, derivation));
+        var lengths = ExpansionLengths.Of(plan, derivation);
+        var segments = plan.Segments.Select(s => new SegmentResult(s, temperatures[s.Id],
+            ZeroMovementPoints.Of(s, lengths, id => temperatures[id].Expansion.Value, derivation))).ToImmutableArray();
+        var checks = new HandCheckedLengths(plan, lengths.Deck, derivation);
+
+        var joints = new List<JointResult>();
+        foreach (var joint in plan.Joints)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            joints.Add(new JointCalculation(plan, basis, rules, counting, derivation)
+                .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id]));
+        }
+        var bearings = plan.Bearings
+            .Select(b => BearingTravels.Of(plan, b, lengths.Of(b), id => temperatures[id], SettingTemperatures.Of(b, plan), derivation))
+            .OfType<BearingTravel>().ToImmutableArray();
+        var restraints = RestraintForces.Of(plan, lengths, id => temperatures[id], derivation);
+        Findings.Note(plan, basis, temperatures, checks, segments, restraints, derivation);
+
+        return Unfinished(counting) with
+        {
+            Segments = segments,
+            Joints = [.. joints],
+            Bearings = bearings,
+            Restraints = restraints,
+            HandChecks = checks.All,
+            Model = new ModelListing(lengths.Deck.Model, lengths.Residual, lengths.Solver.PivotRatio, lengths.RefinementChange),
+            MemoryValues = MemoryValues.Of(derivation.Steps, counting, joints, rules),
+        };
+    }
+
+    private Result Unfinished(CountingTable counting) =>
+        new() { Plan = plan, Counting = counting, Steps = derivation.Steps, Findings = derivation.Findings };
+}
