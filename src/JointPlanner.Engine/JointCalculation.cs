@@ -8,7 +8,7 @@ using JointPlanner.Engine.Plans;
 namespace JointPlanner.Engine;
 
 /// <summary>One joint from its expansion lengths to its setting table.</summary>
-internal sealed class JointCalculation(Plan plan, CodeBasis basis, OwnerRuleSet? rules, CountingTable counting, Derivation derivation)
+internal sealed class JointCalculation(Plan plan, CountingTable counting, Derivation derivation)
 {
     public JointResult Of(
         Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf)

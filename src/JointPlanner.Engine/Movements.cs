@@ -60,7 +60,7 @@ public sealed class Movements
         foreach (var joint in plan.Joints)
         {
             cancellation.ThrowIfCancellationRequested();
-            joints.Add(new JointCalculation(plan, basis, rules, counting, derivation)
+            joints.Add(new JointCalculation(plan, counting, derivation)
                 .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id]));
         }
         var bearings = plan.Bearings
