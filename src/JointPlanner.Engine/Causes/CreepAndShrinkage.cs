@@ -36,7 +36,7 @@ public static class CreepAndShrinkage
     public static readonly Formula Opens = new(
         "shortening.opens", "Δ_j", "opening by the shortening of one segment", Quantity.Movement, [Remaining, Length],
         Positive(Remaining * Length, Quantity.Movement), OneCurve, new(0.0048768, 1e-7,
-            "from memory, check against the licensed text: WSDOT BDM 9.1.3, 0.192 in before rounding", 160e-6, 30.48));
+            "own arithmetic: 160 millionths of 30.48 m are 4.8768 mm", 160e-6, 30.48));
 
     /// <summary>How far the shortening of one segment closes a joint whose face it pulls toward the other.</summary>
     public static readonly Formula Closes = new(

@@ -51,12 +51,12 @@ public static class ZeroPointByHand
     /// <summary>Distance from the zero-movement point down to the lower deck end.</summary>
     public static readonly Formula ToLowerEnd = new(
         "hand.length-to-lower-end", "L_d", "expansion length of the lower deck end by hand", Quantity.Length, [ZeroPoint, Face],
-        ZeroPoint - Face, RigidDeck, new(30.48, 1e-9, "from memory, check against the licensed text: WSDOT BDM 9.1.3, half of 200 ft", 30.48, 0));
+        ZeroPoint - Face, RigidDeck, new(30.48, 1e-9, "own arithmetic: half of a deck of 60.96 m", 30.48, 0));
 
     /// <summary>Distance from the zero-movement point up to the upper deck end.</summary>
     public static readonly Formula ToUpperEnd = new(
         "hand.length-to-upper-end", "L_d", "expansion length of the upper deck end by hand", Quantity.Length, [Face, ZeroPoint],
-        Face - ZeroPoint, RigidDeck, new(30.48, 1e-9, "from memory, check against the licensed text: WSDOT BDM 9.1.3, half of 200 ft", 60.96, 30.48));
+        Face - ZeroPoint, RigidDeck, new(30.48, 1e-9, "own arithmetic: half of a deck of 60.96 m", 60.96, 30.48));
 
     /// <summary>How far the backwall follows the deck: its support takes the share that the series gives it.</summary>
     public static readonly Formula BackwallFollows = new(
