@@ -1,3 +1,5 @@
+using JointPlanner.Archive;
+using JointPlanner.Web.Rooms.Accounts;
 using JointPlanner.Web.Shell;
 using JointPlanner.Web.Start;
 using MudBlazor.Services;
@@ -19,6 +21,8 @@ builder.Services.AddCascadingAuthenticationState();
 builder.Services.AddScoped<Preferences>();
 builder.Services.AddSingleton(DemoMode.From(builder.Configuration));
 builder.AddTrustedProxies();
+builder.AddArchive();
+builder.AddRateLimits();
 
 var app = builder.Build();
 
@@ -31,9 +35,24 @@ if (!app.Environment.IsDevelopment())
 }
 
 app.UseStatusCodePagesWithReExecute("/status/{0}");
+app.UseAuthentication();
+app.UseRateLimiter();
+app.UseAuthorization();
 app.UseAntiforgery();
 app.MapStaticAssets();
 app.MapHealthChecks("/health");
+app.MapLeaving();
 app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
-app.Run();
+try
+{
+    await app.ReadyArchive();
+}
+catch (ArchiveNotReady refusal)
+{
+    Console.Error.WriteLine($"Joint Planner does not start: {refusal.Message}");
+    await app.DisposeAsync();
+    return 3;
+}
+
+await app.RunAsync();
 return 0;

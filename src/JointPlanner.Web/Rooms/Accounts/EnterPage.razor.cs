@@ -1,0 +1,67 @@
+using JointPlanner.Archive.People;
+using JointPlanner.Web.Start;
+using Microsoft.AspNetCore.Components;
+using Microsoft.AspNetCore.Identity;
+
+namespace JointPlanner.Web.Rooms.Accounts;
+
+/// <summary>Signing in: a plain form, because only an ordinary answer can set the cookie.</summary>
+public sealed partial class EnterPage
+{
+    private string says = "";
+
+    /// <summary>What was typed.</summary>
+    [SupplyParameterFromForm]
+    public EnterEntry? Posted { get; set; }
+
+    /// <summary>Where the person came from.</summary>
+    [SupplyParameterFromQuery(Name = "back")]
+    public string? Back { get; set; }
+
+    [Inject]
+    private SignInManager<Person> SignIns { get; set; } = null!;
+
+    [Inject]
+    private UserManager<Person> People { get; set; } = null!;
+
+    [Inject]
+    private NavigationManager Navigation { get; set; } = null!;
+
+    [Inject]
+    private DemoMode Demo { get; set; } = null!;
+
+    private EnterEntry Entry { get; set; } = new();
+
+    /// <inheritdoc/>
+    protected override void OnInitialized() => Entry = Posted ?? new();
+
+    private async Task SignIn()
+    {
+        var person = await People.FindByNameAsync(Entry.Account.Trim());
+        var answer = person is { Active: true }
+            ? await SignIns.PasswordSignInAsync(person, Entry.Password, isPersistent: false, lockoutOnFailure: true)
+            : SignInResult.Failed;
+        if (answer.Succeeded)
+        {
+            Navigation.NavigateTo(IsOurs(Back) ? Back![1..] : "", forceLoad: true);
+            return;
+        }
+
+        says = answer.IsLockedOut
+            ? "Too many wrong tries: this account is closed for ten minutes."
+            : "Account and password do not fit together. Check both; after five wrong tries the account is closed for ten minutes.";
+    }
+
+    // Only ways within this site: "//host" and "/\host" would lead out of it.
+    private static bool IsOurs(string? way) => way is ['/', ..] && !way.StartsWith("//", StringComparison.Ordinal) && !way.Contains('\\', StringComparison.Ordinal);
+}
+
+/// <summary>What is typed to sign in.</summary>
+public sealed class EnterEntry
+{
+    /// <summary>Account.</summary>
+    public string Account { get; set; } = "";
+
+    /// <summary>Password.</summary>
+    public string Password { get; set; } = "";
+}

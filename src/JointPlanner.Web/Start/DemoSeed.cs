@@ -1,0 +1,47 @@
+using System.Security.Cryptography;
+using System.Text.Json;
+using JointPlanner.Archive;
+using JointPlanner.Archive.People;
+using Microsoft.AspNetCore.Identity;
+
+namespace JointPlanner.Web.Start;
+
+/// <summary>
+/// People of the demonstration, one per role, with passwords made at the first start of this installation. They are told on the console at each start.
+/// </summary>
+internal static class DemoSeed
+{
+    private static readonly (string Account, string Name, Role Role)[] People =
+    [
+        ("designer", "Ada Dessauer", Role.Designer), ("checker", "Milan Prochazka", Role.Checker),
+        ("contractor", "Rosa Quint", Role.Contractor), ("owner", "Tilde Overgaard", Role.Owner),
+    ];
+
+    internal static async Task Sow(WebApplication app)
+    {
+        await using var scope = app.Services.CreateAsyncScope();
+        var people = scope.ServiceProvider.GetRequiredService<UserManager<Person>>();
+        var file = Path.Combine(ArchiveSetup.Folder(app.Configuration, app.Environment), "demo-people.json");
+        var passwords = await Passwords(file);
+        var archive = scope.ServiceProvider.GetRequiredService<ArchiveContext>();
+        foreach (var (account, name, role) in People)
+        {
+            if (await people.FindByNameAsync(account) is not null) continue;
+            var person = new Person { UserName = account, Name = name };
+            var made = await people.CreateAsync(person, passwords[account]);
+            if (!made.Succeeded) throw new ArchiveNotReady($"The demo person {account} could not be made: {string.Join(' ', made.Errors.Select(e => e.Description))}");
+        }
+
+        foreach (var (account, _, _) in People) Console.WriteLine($"  demo person  {account,-12} password  {passwords[account]}");
+    }
+
+    private static async Task<Dictionary<string, string>> Passwords(string file)
+    {
+        if (File.Exists(file) && JsonSerializer.Deserialize<Dictionary<string, string>>(await File.ReadAllTextAsync(file)) is { } known
+            && People.All(p => known.ContainsKey(p.Account))) return known;
+        var made = People.ToDictionary(p => p.Account, _ => RandomNumberGenerator.GetString("abcdefghijkmnpqrstuvwxyz23456789", 16));
+        await File.WriteAllTextAsync(file, JsonSerializer.Serialize(made));
+        if (!OperatingSystem.IsWindows()) File.SetUnixFileMode(file, UnixFileMode.UserRead | UnixFileMode.UserWrite);
+        return made;
+    }
+}
