@@ -9,7 +9,21 @@ internal static class Compiler
     public static Func<double[], double> Compile(Expression body, IReadOnlyList<Operand> operands)
     {
         var values = Tree.Parameter(typeof(double[]), "values");
-        return Tree.Lambda<Func<double[], double>>(Visit(body), values).Compile();
+        return Tree.Lambda<Func<double[], double>>(Translate(body, operands, values), values).Compile();
+    }
+
+    /// <summary>The comparison of a choice alone.</summary>
+    public static Func<double[], bool> CompileComparison(Choice choice, IReadOnlyList<Operand> operands)
+    {
+        var values = Tree.Parameter(typeof(double[]), "values");
+        var one = new Choice(choice.Left, choice.Relation, choice.Right, 1, 0);
+        var decides = Tree.Lambda<Func<double[], double>>(Translate(one, operands, values), values).Compile();
+        return given => decides(given) > 0;
+    }
+
+    private static Tree Translate(Expression body, IReadOnlyList<Operand> operands, ParameterExpression values)
+    {
+        return Visit(body);
 
         Tree Visit(Expression e) => e switch
         {

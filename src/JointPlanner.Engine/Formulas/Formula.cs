@@ -1,3 +1,5 @@
+using System.Collections.Concurrent;
+
 namespace JointPlanner.Engine.Formulas;
 
 /// <summary>
@@ -7,6 +9,7 @@ namespace JointPlanner.Engine.Formulas;
 public sealed class Formula
 {
     private readonly Lazy<Func<double[], double>> compiled;
+    private readonly ConcurrentDictionary<Choice, Func<double[], bool>> comparisons = new(ReferenceEqualityComparer.Instance);
 
     /// <summary>Makes a formula and checks its dimensions.</summary>
     /// <param name="id">Permanent id, never reused, dots between words.</param>
@@ -56,6 +59,10 @@ public sealed class Formula
             ? compiled.Value(values)
             : throw new ArgumentException($"Formula {Id} takes {Operands.Count} operands, {values.Length} were given.");
     }
+
+    /// <summary>Whether the comparison of one of this formula's choices holds for these values, in SI; printers show only the side that applies.</summary>
+    public bool Holds(Choice choice, params double[] values) =>
+        comparisons.GetOrAdd(choice, c => Compiler.CompileComparison(c, Operands))(values);
 
     private static bool Contains(Expression e, Predicate<Expression> wanted) => wanted(e) || e switch
     {
