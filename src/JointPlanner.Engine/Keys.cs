@@ -1,4 +1,5 @@
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Fitting.Counting;
 
 namespace JointPlanner.Engine;
 
@@ -22,6 +23,17 @@ public static class Keys
     public static string Travel(string bearing, Cause cause, string end) => $"bearing/{bearing}/travel/{Word(cause)}/{end}";
     public static string TravelTotal(string bearing, string end) => $"bearing/{bearing}/travel/total/{end}";
     public static string RestraintForce(string bearing, string end) => $"bearing/{bearing}/restraint-force/{end}";
+    public static string CountedClosing(string joint, Occasion occasion, Column column) => $"joint/{joint}/{Word(occasion)}/closes-by/{Word(column)}";
+    public static string CountedOpening(string joint, Occasion occasion, Column column) => $"joint/{joint}/{Word(occasion)}/opens-by/{Word(column)}";
+    public static string Racking(string joint, Occasion occasion) => $"joint/{joint}/{Word(occasion)}/racking";
+    public static string Rate(string joint, Occasion occasion) => $"joint/{joint}/{Word(occasion)}/rate";
+    public static string FamilySize(string joint, string family) => $"joint/{joint}/fit/{family}";
+    public static string SetLeast(string joint) => $"joint/{joint}/setting/least";
+    public static string SetGreatest(string joint) => $"joint/{joint}/setting/greatest";
+    public static string SetReserve(string joint) => $"joint/{joint}/setting/reserve";
+    public static string SetValue(string joint) => $"joint/{joint}/setting/set";
+    public static string SetMinus(string joint) => $"joint/{joint}/setting/minus";
+    public static string SetPlus(string joint) => $"joint/{joint}/setting/plus";
 #pragma warning restore CS1591
 
     /// <summary>The word for a cause in keys and files.</summary>
@@ -32,6 +44,15 @@ public static class Keys
 
     /// <summary>The word for a column in keys and files.</summary>
     public static string Word(Column column) => Kebab(column.ToString());
+
+    /// <summary>The word for an occasion in keys.</summary>
+    public static string Word(Occasion occasion) => Kebab(occasion.ToString());
+
+    /// <summary>A cause in running text.</summary>
+    public static string Said(Cause cause) => Word(cause).Replace('-', ' ');
+
+    /// <summary>A column in running text.</summary>
+    public static string Said(Column column) => Word(column).Replace('-', ' ');
 
     private static string Kebab(string name) =>
         string.Concat(name.Select((c, i) => char.IsAsciiLetterUpper(c) ? (i > 0 ? "-" : "") + char.ToLowerInvariant(c) : c.ToString()));

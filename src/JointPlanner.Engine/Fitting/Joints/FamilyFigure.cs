@@ -10,6 +10,9 @@ namespace JointPlanner.Engine.Fitting.Joints;
 /// <param name="Meaning">What the value means, with its direction where it has one.</param>
 public sealed record FamilyFigure(string Word, Quantity Quantity, bool IsRequired, string Meaning)
 {
+    /// <summary>Printed symbol.</summary>
+    public required string Symbol { get; init; }
+
     /// <summary>Column of the counting table whose movements are set against it where the rule set does not say; null where it holds as it stands.</summary>
     public Column? JudgedBy { get; init; }
 

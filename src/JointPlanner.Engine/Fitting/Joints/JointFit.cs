@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Fitting.Counting;
 using JointPlanner.Engine.Formulas;
 
 namespace JointPlanner.Engine.Fitting.Joints;
@@ -26,6 +27,9 @@ public sealed record FamilyFit(string Family, ImmutableArray<SizeFit> Sizes, Siz
 public sealed record SizeFit(
     string Family, string Size, ImmutableArray<RuleCheck> Rules, ImmutableArray<Limit> Limits, Number? ReferenceOpening)
 {
+    /// <summary>What the joint asks in each column that the size is judged by, counted for sizing: what the rules rest on, and what was left out.</summary>
+    public ImmutableArray<ColumnMovement> Movements { get; init; } = [];
+
     /// <summary>True when every rule holds.</summary>
     public bool Fits => Rules.All(r => r.Holds);
 

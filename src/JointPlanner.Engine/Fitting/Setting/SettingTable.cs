@@ -1,6 +1,8 @@
 using System.Collections.Immutable;
-using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Combining;
+using JointPlanner.Engine.Fitting.Joints;
 using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Engine.Fitting.Setting;
 
@@ -13,27 +15,42 @@ namespace JointPlanner.Engine.Fitting.Setting;
 /// <param name="Ages">Deck ages tabulated, s; one null entry where age plays no part.</param>
 /// <param name="Rows">Rows by age, then temperature.</param>
 public sealed record SettingTable(
-    string Joint, Number Rate, Number Min, Number Max, double? LeastAge, ImmutableArray<double?> Ages, ImmutableArray<SettingRow> Rows);
-
-/// <summary>One row: the window at one temperature and deck age, the value to set, and how far off it may be.</summary>
-/// <param name="Temperature">Structure temperature, °C.</param>
-/// <param name="DeckAge">Deck age, s; null where it plays no part.</param>
-/// <param name="Window">The window; null outside the temperatures of the table or below the least age.</param>
-/// <param name="Set">Recommended normal opening after rounding, m; null: do not set.</param>
-/// <param name="Minus">How much smaller it may be made, m, after the reserve U, rounded toward zero.</param>
-/// <param name="Plus">How much larger, likewise.</param>
-/// <param name="Reserve">U, m.</param>
-/// <param name="Refusal">Why no value is given; null where one is.</param>
-public sealed record SettingRow(
-    double Temperature, double? DeckAge, SettingWindow? Window, Number? Set, Number? Minus, Number? Plus, Number? Reserve, Finding? Refusal);
-
-/// <summary>Least and greatest normal opening that may be set, and what governs each end.</summary>
-/// <param name="Least">G_lo, m.</param>
-/// <param name="Greatest">G_hi, m; less than G_lo when nothing fits.</param>
-/// <param name="LeastBy">Limit that governs the lower end.</param>
-/// <param name="GreatestBy">Limit that governs the upper end.</param>
-public sealed record SettingWindow(Number Least, Number Greatest, Limit LeastBy, Limit GreatestBy)
+    string Joint, Number Rate, Number Min, Number Max, double? LeastAge, ImmutableArray<double?> Ages, ImmutableArray<SettingRow> Rows)
 {
-    /// <summary>True when nothing fits at this temperature and age.</summary>
-    public bool IsEmpty => Least.Value > Greatest.Value;
+    /// <summary>The row at the joint's expected setting temperature and age, the one whose steps the sheet derives.</summary>
+    public required SettingRow Design { get; init; }
+
+    /// <summary>The table of one joint. Steps are kept for the design row; the other rows go through the same formulas without keeping theirs.</summary>
+    /// <param name="design">What the joint must take when set at its own deck age.</param>
+    /// <param name="temperatures">Temperatures to tabulate, °C.</param>
+    /// <param name="ages">Further deck ages to tabulate, s; they play no part where the decks at the joint do not shorten.</param>
+    /// <param name="demandAt">What the joint must take when set at another deck age; computed without steps.</param>
+    /// <param name="size">The size chosen.</param>
+    /// <param name="manner">How values are chosen, rounded and guarded.</param>
+    /// <param name="derivation">Where the steps of the design row go.</param>
+    public static SettingTable Of(
+        JointDemand design, IReadOnlyList<double> temperatures, IReadOnlyList<double> ages, Func<double, JointDemand> demandAt,
+        SizeFit size, SettingManner manner, Derivation derivation)
+    {
+        var joint = design.Joint;
+        var temperature = derivation.Given($"joints/{joint.Id}/setting/temperature", "T_set", "temperature of the structure at setting",
+            Quantity.Temperature, joint.SettingTemperature);
+        var row = SettingRows.At(temperature, design, size, manner, derivation);
+        if (row.Refusal is { } refusal) derivation.Note(refusal with { Severity = Severity.BlocksIssue });
+
+        var withoutSteps = new Derivation(keepsSteps: false);
+        ImmutableArray<double?> tabulated = design.DeckAge is null ? [null] : [.. ages.Append(design.DeckAge.Value).Distinct().Order()];
+        var rows = ImmutableArray.CreateBuilder<SettingRow>(tabulated.Length * temperatures.Count);
+        foreach (var age in tabulated)
+        {
+            var demand = age == design.DeckAge ? design : demandAt(age!.Value);
+            foreach (var t in temperatures)
+                rows.Add(SettingRows.At(new Number(-1, t), demand, size, manner, withoutSteps));
+        }
+
+        var ends = RuleOpening.Temperatures(design, derivation)
+            ?? (new Number(-1, temperatures.DefaultIfEmpty(temperature.Value).Min()), new Number(-1, temperatures.DefaultIfEmpty(temperature.Value).Max()));
+        var rate = RuleOpening.Rate(design, Counting.Occasion.Setting, derivation);
+        return new SettingTable(joint.Id, rate, ends.Min, ends.Max, joint.LeastAge, tabulated, rows.ToImmutable()) { Design = row };
+    }
 }
