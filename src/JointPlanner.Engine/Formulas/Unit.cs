@@ -22,6 +22,7 @@ public sealed record Unit(string Name, Dimension Dimension, double Factor, doubl
 #pragma warning disable CS1591 // the names say it
     public static readonly Unit One = new("", Dimension.None, 1);
     public static readonly Unit Percent = new("%", Dimension.None, 0.01);
+    public static readonly Unit PerMille = new("‰", Dimension.None, 1e-3);
     public static readonly Unit Millionth = new("µε", Dimension.None, 1e-6);
     public static readonly Unit Degree = new("°", Dimension.None, Math.PI / 180);
     public static readonly Unit Radian = new("rad", Dimension.None, 1);
@@ -33,10 +34,12 @@ public sealed record Unit(string Name, Dimension Dimension, double Factor, doubl
     public static readonly Unit InchUnit = new("in", L1, Inch);
     public static readonly Unit SquareMetre = new("m²", L2, 1);
     public static readonly Unit SquareMillimetre = new("mm²", L2, 1e-6);
+    public static readonly Unit SquareCentimetre = new("cm²", L2, 1e-4);
     public static readonly Unit SquareFoot = new("ft²", L2, 144 * Inch * Inch);
     public static readonly Unit SquareInch = new("in²", L2, Inch * Inch);
     public static readonly Unit MetreFourth = new("m⁴", L4, 1);
     public static readonly Unit MillimetreFourth = new("mm⁴", L4, 1e-12);
+    public static readonly Unit CentimetreFourth = new("cm⁴", L4, 1e-8);
     public static readonly Unit InchFourth = new("in⁴", L4, Inch * Inch * Inch * Inch);
     public static readonly Unit FootFourth = new("ft⁴", L4, 20736 * Inch * Inch * Inch * Inch);
     public static readonly Unit Celsius = new("°C", Theta, 1, 0, true);
@@ -47,12 +50,15 @@ public sealed record Unit(string Name, Dimension Dimension, double Factor, doubl
     public static readonly Unit PerKelvin = new("/K", Dimension.None / Theta, 1);
     public static readonly Unit PerCelsius = new("/°C", Dimension.None / Theta, 1);
     public static readonly Unit PerFahrenheit = new("/°F", Dimension.None / Theta, 1.8);
+    public static readonly Unit MillionthPerKelvin = new("µε/K", Dimension.None / Theta, 1e-6);
+    public static readonly Unit MillionthPerFahrenheit = new("µε/°F", Dimension.None / Theta, 1.8e-6);
     public static readonly Unit Newton = new("N", N, 1);
     public static readonly Unit Kilonewton = new("kN", N, 1e3);
     public static readonly Unit Meganewton = new("MN", N, 1e6);
     public static readonly Unit Giganewton = new("GN", N, 1e9);
     public static readonly Unit Kip = new("kip", N, 1000 * PoundForce);
     public static readonly Unit NewtonPerMetre = new("N/m", N / L1, 1);
+    public static readonly Unit NewtonPerMillimetre = new("N/mm", N / L1, 1e3);
     public static readonly Unit KilonewtonPerMillimetre = new("kN/mm", N / L1, 1e6);
     public static readonly Unit KilonewtonPerMetre = new("kN/m", N / L1, 1e3);
     public static readonly Unit MeganewtonPerMetre = new("MN/m", N / L1, 1e6);
