@@ -39,9 +39,6 @@ public static class Keys
     /// <summary>The word for a cause in keys and files.</summary>
     public static string Word(Cause cause) => Kebab(cause.ToString());
 
-    /// <summary>A cause in plain words, for sentences.</summary>
-    public static string Words(Cause cause) => Word(cause).Replace('-', ' ');
-
     /// <summary>The word for a column in keys and files.</summary>
     public static string Word(Column column) => Kebab(column.ToString());
 

@@ -14,20 +14,20 @@ public sealed class Movements
 {
     private readonly Plan plan;
     private readonly CodeBasis basis;
-    private readonly OwnerRuleSet? rules;
+    private readonly Owner? owner;
     private readonly Derivation derivation = new();
 
-    private Movements(Plan plan, CodeBasis basis, OwnerRuleSet? rules) => (this.plan, this.basis, this.rules) = (plan, basis, rules);
+    private Movements(Plan plan, CodeBasis basis, Owner? owner) => (this.plan, this.basis, this.owner) = (plan, basis, owner);
 
     /// <summary>Computes a plan. What stands in the way is a finding of the result, never an exception.</summary>
     /// <param name="plan">An accepted plan.</param>
     /// <param name="basis">The code edition.</param>
-    /// <param name="rules">The owner's rule set; null for none, and then nothing is fitted.</param>
+    /// <param name="owner">The owner's rules; null for none, and then nothing is fitted.</param>
     /// <param name="cancellation">Stops between joints.</param>
-    public static Result Of(Plan plan, CodeBasis basis, OwnerRuleSet? rules, CancellationToken cancellation = default)
+    public static Result Of(Plan plan, CodeBasis basis, Owner? owner, CancellationToken cancellation = default)
     {
-        var movements = new Movements(plan, basis, rules);
-        var counting = CountingLayers.Of(plan, basis, rules);
+        var movements = new Movements(plan, basis, owner);
+        var counting = CountingLayers.Of(plan, basis, owner?.Rules);
         try
         {
             return movements.Compute(counting, cancellation);
@@ -60,7 +60,7 @@ public sealed class Movements
         foreach (var joint in plan.Joints)
         {
             cancellation.ThrowIfCancellationRequested();
-            joints.Add(new JointCalculation(plan, counting, derivation)
+            joints.Add(new JointCalculation(plan, basis, owner, counting, derivation)
                 .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id]));
         }
         var bearings = plan.Bearings
@@ -77,7 +77,7 @@ public sealed class Movements
             Restraints = restraints,
             HandChecks = checks.All,
             Model = new ModelListing(lengths.Deck.Model, lengths.Residual, lengths.Solver.PivotRatio, lengths.RefinementChange),
-            MemoryValues = MemoryValues.Of(derivation.Steps, counting, joints, rules),
+            MemoryValues = MemoryValues.Of(derivation.Steps, counting, joints, owner?.Rules),
         };
     }
 

@@ -33,7 +33,7 @@ public sealed record SettingTable(
         SizeFit size, SettingManner manner, Derivation derivation)
     {
         var joint = design.Joint;
-        var temperature = derivation.Given($"joints/{joint.Id}/setting/temperature", "T_set", "temperature of the structure at setting",
+        var temperature = derivation.Given($"joints/{joint.Id}/setting/temperature", "T_set", "structure temperature at setting, as expected",
             Quantity.Temperature, joint.SettingTemperature);
         var row = SettingRows.At(temperature, design, size, manner, derivation);
         if (row.Refusal is { } refusal) derivation.Note(refusal with { Severity = Severity.BlocksIssue });
