@@ -1,0 +1,71 @@
+using System.Globalization;
+using JointPlanner.Pdf.Reading;
+using JointPlanner.Pdf.Tests.Reading;
+using JointPlanner.Pdf.Tests.Signing;
+using JointPlanner.Pdf.Verifying;
+
+namespace JointPlanner.Pdf.Tests.Verifying;
+
+public class EveryFlipTests
+{
+    private static readonly Verifier Verifier = new(TestAuthority.Known.Roots);
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public async Task A_flipped_bit_outside_the_last_signatures_value_is_reported(bool packed)
+    {
+        byte[] signed = await Signed.ByBoth(packed ? SampleSheet.WithStream() : SampleSheet.WithTable());
+        var hole = LastHole(signed);
+        var missed = new List<string>();
+        // Every byte is hit; which of its bits moves on with the byte, so that eight neighbours try all eight.
+        for (int at = 0; at < signed.Length; at++)
+        {
+            if (at > hole.Start && at < hole.End - 1) continue;
+            if (IsInFirstHole(signed, at) && at % 7 != 0) continue; // a long stretch of like digits; each seventh will do
+            if (!Reported(signed, at, at % 8)) missed.Add(string.Create(CultureInfo.InvariantCulture, $"byte {at}, bit {at % 8}"));
+        }
+        Assert.Empty(missed);
+    }
+
+    [Fact]
+    public async Task A_flipped_bit_inside_the_signatures_value_is_reported_or_its_part_is_listed_as_not_signed()
+    {
+        byte[] signed = await Signed.By(SampleSheet.WithTable(), "checker", TestAuthority.Checker);
+        var hole = LastHole(signed);
+        int length = hole.Value.AsSpan().LastIndexOfAnyExcept((byte)0) + 1;
+        var before = Verifier.Verify(signed).Signatures.Single();
+        var missed = new List<int>();
+        for (int at = hole.Start + 1; at < hole.End - 1; at++)
+        {
+            bool padding = at > hole.Start + (2 * length) + 2;
+            if (padding && at % 50 != 0) continue;
+            if (!Reported(signed, at, at % 8)) missed.Add((at - hole.Start - 1) / 2);
+        }
+        // What gets by lies in parts that the report lists; it names the signer, the time and the bytes as before.
+        Assert.Contains("the further certificates carried along", before.NotSigned);
+        Assert.All(missed, at => Assert.True(at < length, "padding changed unnoticed"));
+        Assert.Equal("", string.Join(",", missed));
+    }
+
+    private static bool Reported(byte[] signed, int at, int bit)
+    {
+        byte[] flipped = [.. signed];
+        flipped[at] ^= (byte)(1 << bit);
+        var report = Verifier.Verify(flipped);
+        return report.Origin != FileOrigin.InTheFormOfASheet || report.Signatures.Count == 0
+            || report.Signatures.Any(signature => signature.Unchanged.Verdict != UnchangedVerdict.Unchanged || signature.Who.Verdict != WhoVerdict.KnownIssuer);
+    }
+
+    private static bool IsInFirstHole(byte[] signed, int at)
+    {
+        int first = signed.AsSpan().IndexOf("/Contents<"u8) + 9;
+        return at > first && at < first + signed.AsSpan(first).IndexOf((byte)'>');
+    }
+
+    private static SignatureHole LastHole(byte[] signed)
+    {
+        var file = PdfRevisions.Open(signed);
+        return FormFields.In(file.Last).Where(field => field.IsFilled(file.Last)).Select(field => SignatureHole.Find(file, file.Last, field.Dictionary["V"]).Hole!).MaxBy(hole => hole.Covered)!;
+    }
+}
