@@ -3,11 +3,12 @@ using System.IO.Compression;
 using System.Security.Cryptography;
 using System.Text;
 using JointPlanner.Pdf.Reading;
+using JointPlanner.Pdf.Writing;
 
 namespace JointPlanner.Pdf.Signing;
 
 /// <summary>Collects changed and new objects and appends them to a file; not one byte of the file before is touched.</summary>
-internal sealed class UpdateWriter
+internal sealed class UpdateWriter : INewObjects
 {
     private readonly PdfRevisions _file;
     private readonly SortedDictionary<int, (int Generation, byte[] Body)> _objects = [];
@@ -35,14 +36,15 @@ internal sealed class UpdateWriter
         return number;
     }
 
-    /// <summary>Adds a packed stream.</summary>
-    /// <param name="entries">Entries of its dictionary, in the PDF language, without length and filter.</param>
-    /// <param name="data">Its content.</param>
-    public int AddStream(string entries, byte[] data)
+    public int Add(Writing.PdfDictionary content) => Add(content.ToString());
+
+    public int AddStream(Writing.PdfDictionary head, ReadOnlySpan<byte> data, bool compress = true)
     {
         int number = Reserve();
-        var packed = Pack(data);
-        _objects[number] = (0, [.. Encoding.Latin1.GetBytes(string.Create(CultureInfo.InvariantCulture, $"<<{entries}/Filter/FlateDecode/Length {packed.Length}>>\nstream\n")), .. packed, .. "\nendstream"u8]);
+        var content = compress ? Pack(data) : data;
+        if (compress) head.Name("Filter", "FlateDecode");
+        head.Number("Length", content.Length);
+        _objects[number] = (0, [.. Encoding.Latin1.GetBytes(head.ToString()), .. "\nstream\n"u8, .. content, .. "\nendstream"u8]);
         return number;
     }
 
@@ -95,14 +97,14 @@ internal sealed class UpdateWriter
         var rows = new List<byte>();
         foreach (var (place, generation) in places.Values)
             rows.AddRange([1, (byte)(place >> 24), (byte)((place >> 16) & 255), (byte)((place >> 8) & 255), (byte)(place & 255), (byte)((generation >> 8) & 255), (byte)(generation & 255)]);
-        var packed = Pack([.. rows]);
+        var packed = Pack(rows.ToArray());
         string index = string.Join(' ', places.Keys.Select(number => string.Create(CultureInfo.InvariantCulture, $"{number} 1")));
         Write(output, $"{self} 0 obj\n<</Type/XRef/Size {_next}/W[1 4 2]/Index[{index}]{trailer}/Filter/FlateDecode/Length {packed.Length}>>\nstream\n");
         output.Write(packed);
         Write(output, $"\nendstream\nendobj\nstartxref\n{start}\n%%EOF\n");
     }
 
-    private static byte[] Pack(byte[] data)
+    private static byte[] Pack(ReadOnlySpan<byte> data)
     {
         using var packed = new MemoryStream();
         // Closed before the bytes are taken: closing writes the checksum.

@@ -1,5 +1,4 @@
 using System.Globalization;
-using System.Text;
 
 namespace JointPlanner.Pdf.Verifying;
 
@@ -10,15 +9,8 @@ internal static class PlainText
 
     public static string Of(string? text)
     {
-        var plain = new StringBuilder();
-        foreach (var rune in (text ?? "").EnumerateRunes())
-        {
-            if (plain.Length >= Longest) return plain.Append('…').ToString();
-            bool shown = Rune.GetUnicodeCategory(rune) is not (UnicodeCategory.Control or UnicodeCategory.Format or UnicodeCategory.LineSeparator
-                or UnicodeCategory.ParagraphSeparator or UnicodeCategory.PrivateUse or UnicodeCategory.Surrogate or UnicodeCategory.OtherNotAssigned);
-            plain.Append(shown ? rune.ToString() : "\uFFFD");
-        }
-        return plain.ToString();
+        if (text is null) return "";
+        return Pictures.PlainCharacters.Of(text.Length > Longest ? text[..Longest] + "…" : text);
     }
 
     /// <summary>A list of things for one sentence, cut after twelve.</summary>

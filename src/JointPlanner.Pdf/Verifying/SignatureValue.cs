@@ -35,7 +35,7 @@ internal sealed record SignatureValue(X509Certificate2 Certificate, X509Certific
     {
         AsnDecoder.ReadEncodedValue(padded, AsnEncodingRules.BER, out _, out _, out int used);
         if (padded.AsSpan(used).ContainsAnyExcept((byte)0)) return (null, "bytes are hidden behind the signature's value");
-        if (!SignatureLayout.IsPlain(padded.AsMemory(0, used))) return (null, "the signature's value is not laid out as the standard wants it");
+        if (!SignatureEncoding.IsPlain(padded.AsMemory(0, used))) return (null, "the signature's value is not laid out as the standard wants it");
         var cms = new SignedCms(new ContentInfo(signed), detached: true);
         cms.Decode(padded.AsSpan(0, used));
         if (!cms.Detached) return (null, "the signature carries a content of its own instead of signing the file");

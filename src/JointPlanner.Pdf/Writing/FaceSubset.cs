@@ -34,7 +34,7 @@ internal sealed class FaceSubset(Face face, string name)
     }
 
     /// <summary>Writes the font with its glyphs, widths and way back to Unicode (ISO 32000-1, 9.7 and 9.10.3); gives its object's number.</summary>
-    public int Write(ObjectFile file)
+    public int Write(INewObjects file)
     {
         var glyphs = new GlyphProgram(face, _characters);
         var tag = new string([.. SHA256.HashData(glyphs.Bytes).Take(6).Select(b => (char)('A' + (b % 26)))]);

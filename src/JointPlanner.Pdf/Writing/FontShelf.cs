@@ -17,7 +17,7 @@ internal sealed class FontShelf
     }
 
     /// <summary>Writes all fonts and gives the resource dictionary that all pages share.</summary>
-    public PdfDictionary Write(ObjectFile file)
+    public PdfDictionary Write(INewObjects file)
     {
         var fonts = new PdfDictionary();
         foreach (var font in _fonts) fonts.Reference(font.Name, font.Write(file));

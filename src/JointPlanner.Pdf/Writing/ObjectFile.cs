@@ -8,7 +8,7 @@ namespace JointPlanner.Pdf.Writing;
 /// A file in the making: numbered objects, packed into object streams except those that a later signature may rewrite, and one
 /// cross-reference stream (ISO 32000-1, 7.5.7 and 7.5.8). Same objects, same bytes; the file's identifier comes from its content.
 /// </summary>
-internal sealed class ObjectFile
+internal sealed class ObjectFile : INewObjects
 {
     private const int PackSize = 200;
     private readonly List<byte[]?> _bodies = [null];

@@ -11,8 +11,8 @@ public class PdfRevisionsTests
     [Fact]
     public void Table_and_stream_give_the_same_document()
     {
-        var table = PdfRevisions.Open(SampleSheet.WithTable()).Last;
-        var stream = PdfRevisions.Open(SampleSheet.WithStream()).Last;
+        var table = PdfRevisions.Open(HandMadeSheet.WithTable()).Last;
+        var stream = PdfRevisions.Open(HandMadeSheet.WithStream()).Last;
         for (int number = 1; number <= 14; number++)
             Assert.True(CanonicalText.Same(table.Object(number)!.Value, stream.Object(number)!.Value), string.Create(CultureInfo.InvariantCulture, $"object {number}"));
     }
@@ -21,16 +21,16 @@ public class PdfRevisionsTests
     public void A_file_that_qpdf_packed_reads_as_before()
     {
         using var tool = new OutsideTool();
-        tool.Write("plain.pdf", SampleSheet.WithTable());
+        tool.Write("plain.pdf", HandMadeSheet.WithTable());
         Assert.Equal(0, tool.Run("qpdf", "--object-streams=generate", "plain.pdf", "packed.pdf").ExitCode);
         byte[] packed = tool.Read("packed.pdf");
-        Assert.Equal(SampleSheet.ResultsText, Encoding.UTF8.GetString(Attachments.Read(packed).Single(file => file.Name == "results.json").Bytes));
+        Assert.Equal(HandMadeSheet.ResultsText, Encoding.UTF8.GetString(Attachments.Read(packed).Single(file => file.Name == "results.json").Bytes));
     }
 
     [Fact]
     public void Each_revision_looks_as_the_file_did_then()
     {
-        byte[] first = SampleSheet.WithTable();
+        byte[] first = HandMadeSheet.WithTable();
         byte[] second = HandMadeUpdate.Append(first, (7, "<</Title(Other)>>"));
         var file = PdfRevisions.Open(second);
         Assert.Equal(first.Length, file.All[0].End);
@@ -47,10 +47,10 @@ public class PdfRevisionsTests
     public void Another_kind_of_file_is_told() => Refused(PdfReadFailure.NotAPdf, "PK\u0003\u0004 and so on"u8.ToArray());
 
     [Fact]
-    public void A_file_cut_short_is_told() => Refused(PdfReadFailure.Malformed, SampleSheet.WithTable()[..^40]);
+    public void A_file_cut_short_is_told() => Refused(PdfReadFailure.Malformed, HandMadeSheet.WithTable()[..^40]);
 
     [Fact]
-    public void Bytes_behind_the_end_are_told() => Refused(PdfReadFailure.Malformed, [.. SampleSheet.WithTable(), (byte)'x']);
+    public void Bytes_behind_the_end_are_told() => Refused(PdfReadFailure.Malformed, [.. HandMadeSheet.WithTable(), (byte)'x']);
 
     [Fact]
     public void More_than_50_000_objects_are_not_read()
@@ -62,7 +62,7 @@ public class PdfRevisionsTests
     [Fact]
     public void More_than_64_revisions_are_not_read()
     {
-        byte[] file = SampleSheet.WithTable();
+        byte[] file = HandMadeSheet.WithTable();
         for (int i = 1; i < 64; i++) file = HandMadeUpdate.Append(file);
         Assert.Equal(64, PdfRevisions.Open(file).All.Count);
         Refused(PdfReadFailure.TooManyRevisions, HandMadeUpdate.Append(file));
@@ -76,7 +76,7 @@ public class PdfRevisionsTests
     public void A_linearised_file_is_told()
     {
         using var tool = new OutsideTool();
-        tool.Write("plain.pdf", SampleSheet.WithTable());
+        tool.Write("plain.pdf", HandMadeSheet.WithTable());
         Assert.Equal(0, tool.Run("qpdf", "--linearize", "plain.pdf", "linear.pdf").ExitCode);
         Assert.Throws<PdfReadException>(() => PdfRevisions.Open(tool.Read("linear.pdf")));
     }
@@ -85,7 +85,7 @@ public class PdfRevisionsTests
     public void An_encrypted_file_is_told()
     {
         using var tool = new OutsideTool();
-        tool.Write("plain.pdf", SampleSheet.WithTable());
+        tool.Write("plain.pdf", HandMadeSheet.WithTable());
         Assert.Equal(0, tool.Run("qpdf", "--encrypt", "", "owner", "256", "--", "plain.pdf", "locked.pdf").ExitCode);
         Refused(PdfReadFailure.Unsupported, tool.Read("locked.pdf"));
     }
@@ -104,7 +104,7 @@ public class PdfRevisionsTests
     [Fact]
     public void An_object_that_is_not_where_it_is_said_to_be_is_told()
     {
-        byte[] file = SampleSheet.WithTable();
+        byte[] file = HandMadeSheet.WithTable();
         int entry = file.AsSpan().IndexOf(" 00000 n"u8);
         file[entry - 1] ^= 1;
         Assert.Equal(PdfReadFailure.Malformed, Assert.Throws<PdfReadException>(() => PdfRevisions.Open(file).Last.Object(1)).Failure);
@@ -125,7 +125,7 @@ public class PdfRevisionsTests
         byte[] packed = Pack(new byte[20 * 1024 * 1024]);
         string stream = $"<</Filter/FlateDecode/Length {packed.Length.ToString(CultureInfo.InvariantCulture)}>>\nstream\n{Encoding.Latin1.GetString(packed)}\nendstream";
         string names = string.Concat(Enumerable.Range(0, 6).Select(i => string.Create(CultureInfo.InvariantCulture, $"({i})<</EF<</F {20 + i} 0 R>>>>")));
-        byte[] file = HandMadeUpdate.Append(SampleSheet.WithTable(),
+        byte[] file = HandMadeUpdate.Append(HandMadeSheet.WithTable(),
             [(1, $"<</Type/Catalog/Pages 2 0 R/Names<</EmbeddedFiles<</Names[{names}]>>>>>>"), .. Enumerable.Range(20, 6).Select(number => (number, stream))]);
         Assert.Equal(PdfReadFailure.InflatesTooFar, Assert.Throws<PdfReadException>(() => Attachments.Read(file)).Failure);
     }
@@ -135,14 +135,14 @@ public class PdfRevisionsTests
     {
         // Each stream's length is said to stand in the next stream.
         var chain = Enumerable.Range(20, 2000).Select(number => (number, string.Create(CultureInfo.InvariantCulture, $"<</Length {number + 1} 0 R>>\nstream\n\nendstream"))).ToArray();
-        var view = PdfRevisions.Open(HandMadeUpdate.Append(SampleSheet.WithTable(), chain)).Last;
+        var view = PdfRevisions.Open(HandMadeUpdate.Append(HandMadeSheet.WithTable(), chain)).Last;
         Assert.Equal(PdfReadFailure.Malformed, Assert.Throws<PdfReadException>(() => view.Object(20)).Failure);
     }
 
     [Fact]
     public void A_list_of_attachments_that_runs_in_a_circle_is_told()
     {
-        byte[] file = HandMadeUpdate.Append(SampleSheet.WithTable(), (1, "<</Type/Catalog/Pages 2 0 R/Names<</EmbeddedFiles 20 0 R>>>>"), (20, "<</Kids[20 0 R]>>"));
+        byte[] file = HandMadeUpdate.Append(HandMadeSheet.WithTable(), (1, "<</Type/Catalog/Pages 2 0 R/Names<</EmbeddedFiles 20 0 R>>>>"), (20, "<</Kids[20 0 R]>>"));
         Assert.Contains("circle", Assert.Throws<PdfReadException>(() => Attachments.Read(file)).Message, StringComparison.Ordinal);
     }
 
@@ -150,7 +150,7 @@ public class PdfRevisionsTests
     public void Reading_stops_when_the_time_is_over()
     {
         var limits = PdfReadLimits.Default with { Time = TimeSpan.Zero };
-        Assert.Equal(PdfReadFailure.TookTooLong, Assert.Throws<PdfReadException>(() => PdfRevisions.Open(SampleSheet.WithTable(), limits)).Failure);
+        Assert.Equal(PdfReadFailure.TookTooLong, Assert.Throws<PdfReadException>(() => PdfRevisions.Open(HandMadeSheet.WithTable(), limits)).Failure);
     }
 
     [Fact]
@@ -158,7 +158,7 @@ public class PdfRevisionsTests
     {
         using var called = new CancellationTokenSource();
         called.Cancel();
-        Assert.ThrowsAny<OperationCanceledException>(() => PdfRevisions.Open(SampleSheet.WithTable(), null, called.Token));
+        Assert.ThrowsAny<OperationCanceledException>(() => PdfRevisions.Open(HandMadeSheet.WithTable(), null, called.Token));
     }
 
     [Fact]
@@ -182,12 +182,12 @@ public class PdfRevisionsTests
         Assert.Contains("bytes of strings", failure.Message, StringComparison.Ordinal);
     }
 
-    private static PdfDictionary Catalog(string value) => PdfRevisions.Open(HandMadeUpdate.Append(SampleSheet.WithTable(), (1, $"<</Type/Catalog/X {value}>>"))).Last.Catalog;
+    private static PdfDictionary Catalog(string value) => PdfRevisions.Open(HandMadeUpdate.Append(HandMadeSheet.WithTable(), (1, $"<</Type/Catalog/X {value}>>"))).Last.Catalog;
 
     private static byte[] WithAttachment(byte[] content)
     {
         byte[] packed = Pack(content);
-        return HandMadeUpdate.Append(SampleSheet.WithTable(), (13, $"<</Type/EmbeddedFile/Filter/FlateDecode/Length {packed.Length.ToString(CultureInfo.InvariantCulture)}>>\nstream\n{Encoding.Latin1.GetString(packed)}\nendstream"));
+        return HandMadeUpdate.Append(HandMadeSheet.WithTable(), (13, $"<</Type/EmbeddedFile/Filter/FlateDecode/Length {packed.Length.ToString(CultureInfo.InvariantCulture)}>>\nstream\n{Encoding.Latin1.GetString(packed)}\nendstream"));
     }
 
     private static byte[] Pack(byte[] data)

@@ -39,7 +39,7 @@ public sealed class OutsideToolsTests : IDisposable
     [Fact]
     public async Task Pdfsig_reports_a_digest_mismatch_after_one_changed_byte()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         int title = signed.AsSpan().IndexOf("(Sample)"u8);
         signed[title + 1] = (byte)'s';
         _tool.Write("signed.pdf", signed);
@@ -60,7 +60,7 @@ public sealed class OutsideToolsTests : IDisposable
     [Fact]
     public async Task Openssl_verifies_each_extracted_signature_as_cades()
     {
-        byte[] signed = await Signed.ByBoth(SampleSheet.WithStream());
+        byte[] signed = await Signed.ByBoth(HandMadeSheet.WithStream());
         _tool.Write("root.pem", Pem(TestAuthority.Known.Root));
         var file = PdfRevisions.Open(signed);
         foreach (var field in FormFields.In(file.Last))
@@ -78,7 +78,7 @@ public sealed class OutsideToolsTests : IDisposable
     [Fact]
     public async Task The_signature_states_no_signing_time_attribute()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithStream(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithStream(), "designer", TestAuthority.Designer);
         var file = PdfRevisions.Open(signed);
         _tool.Write("signature.der", SignatureHole.Find(file, file.Last, FormFields.In(file.Last)[0].Dictionary["V"]).Hole!.Value);
         var (_, output) = _tool.Run("openssl", "cms", "-cmsout", "-print", "-noout", "-inform", "DER", "-in", "signature.der");
@@ -90,7 +90,7 @@ public sealed class OutsideToolsTests : IDisposable
     [Fact]
     public async Task A_certifying_signature_is_valid_and_the_next_one_too()
     {
-        byte[] sheet = SampleSheet.WithTable();
+        byte[] sheet = HandMadeSheet.WithTable();
         byte[] certified = (await Signer.SignAsync(sheet, Signed.Request(sheet, "designer", TestAuthority.Designer) with { Certify = true })).Bytes;
         _tool.Write("signed.pdf", await Signed.By(certified, "checker", TestAuthority.Checker));
         Assert.Equal(2, Regex.Count(Pdfsig(), "Signature is Valid"));
@@ -101,9 +101,9 @@ public sealed class OutsideToolsTests : IDisposable
 
     private static byte[] Sample(string variant) => variant switch
     {
-        "stream" => SampleSheet.WithStream(),
-        "table" => SampleSheet.WithTable(),
-        _ => SampleSheet.WithFormInCatalog(),
+        "stream" => HandMadeSheet.WithStream(),
+        "table" => HandMadeSheet.WithTable(),
+        _ => HandMadeSheet.WithFormInCatalog(),
     };
 
     private string Pdfsig()

@@ -21,7 +21,7 @@ public class PfxTests
     [Fact]
     public async Task A_sheet_is_signed_with_a_loaded_key()
     {
-        byte[] sheet = Reading.SampleSheet.WithStream();
+        byte[] sheet = Reading.HandMadeSheet.WithStream();
         using var key = Pfx.Load(File(TestAuthority.Designer), Password).Key;
         var request = Signed.Request(sheet, "designer", key!.Certificate) with { Chain = key.Chain };
         Assert.True((await Signer.SignAsync(sheet, request)).Appended.Length > 0);

@@ -9,7 +9,7 @@ namespace JointPlanner.Pdf.Tests.Signing;
 
 public class SignerTests
 {
-    private static readonly byte[] Sheet = SampleSheet.WithStream();
+    private static readonly byte[] Sheet = HandMadeSheet.WithStream();
 
     [Fact]
     public async Task The_signed_file_begins_with_the_unsigned_one_byte_for_byte()
@@ -62,7 +62,7 @@ public class SignerTests
     [Fact]
     public async Task A_pdf_without_prepared_fields_is_not_ours()
     {
-        byte[] other = SampleSheet.WithoutFields();
+        byte[] other = HandMadeSheet.WithoutFields();
         Assert.Contains("not a sheet made by this program", await Refusal(SigningRefusal.NoSuchField, Signed.Request(other, "designer", TestAuthority.Designer), other), StringComparison.Ordinal);
     }
 

@@ -29,11 +29,11 @@ internal static class CmsForgery
     }
 
     /// <summary>Replaces a text of the signed bytes by one of the same length and signs them anew.</summary>
-    public static byte[] Again(byte[] signed, X509Certificate2 certificate, string from, string to)
+    public static byte[] Again(byte[] signed, X509Certificate2 certificate, string from, string to, int field = 0)
     {
         byte[] file = [.. signed];
         var revisions = PdfRevisions.Open(file);
-        var hole = JointPlanner.Pdf.Verifying.SignatureHole.Find(revisions, revisions.Last, JointPlanner.Pdf.Verifying.FormFields.In(revisions.Last)[0].Dictionary["V"]).Hole!;
+        var hole = JointPlanner.Pdf.Verifying.SignatureHole.Find(revisions, revisions.Last, JointPlanner.Pdf.Verifying.FormFields.In(revisions.Last)[field].Dictionary["V"]).Hole!;
         int at = file.AsSpan().IndexOf(Encoding.ASCII.GetBytes(from));
         Assert.True(at > 0 && from.Length == to.Length);
         Encoding.ASCII.GetBytes(to).CopyTo(file, at);

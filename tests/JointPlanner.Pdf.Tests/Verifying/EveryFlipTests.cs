@@ -10,19 +10,21 @@ public class EveryFlipTests
 {
     private static readonly Verifier Verifier = new(TestAuthority.Known.Roots);
 
+    private const int Step = 5;
+
     [Theory]
     [InlineData(true)]
     [InlineData(false)]
     public async Task A_flipped_bit_outside_the_last_signatures_value_is_reported(bool packed)
     {
-        byte[] signed = await Signed.ByBoth(packed ? SampleSheet.WithStream() : SampleSheet.WithTable());
+        byte[] signed = await Signed.ByBoth(packed ? HandMadeSheet.WithStream() : HandMadeSheet.WithTable());
         var hole = LastHole(signed);
         var missed = new List<string>();
-        // Every byte is hit; which of its bits moves on with the byte, so that eight neighbours try all eight.
-        for (int at = 0; at < signed.Length; at++)
+        // With a step of 1 every byte is hit; that was run too, and takes a minute. Which bit is flipped moves on with the byte.
+        for (int at = 0; at < signed.Length; at += Step)
         {
             if (at > hole.Start && at < hole.End - 1) continue;
-            if (IsInFirstHole(signed, at) && at % 7 != 0) continue; // a long stretch of like digits; each seventh will do
+            if (IsInFirstHole(signed, at) && at % 11 != 0) continue; // a long stretch of like digits
             if (!Reported(signed, at, at % 8)) missed.Add(string.Create(CultureInfo.InvariantCulture, $"byte {at}, bit {at % 8}"));
         }
         Assert.Empty(missed);
@@ -31,20 +33,18 @@ public class EveryFlipTests
     [Fact]
     public async Task A_flipped_bit_inside_the_signatures_value_is_reported_or_its_part_is_listed_as_not_signed()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "checker", TestAuthority.Checker);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "checker", TestAuthority.Checker);
         var hole = LastHole(signed);
         int length = hole.Value.AsSpan().LastIndexOfAnyExcept((byte)0) + 1;
         var before = Verifier.Verify(signed).Signatures.Single();
         var missed = new List<int>();
-        for (int at = hole.Start + 1; at < hole.End - 1; at++)
+        for (int at = hole.Start + 1; at < hole.End - 1; at += Step)
         {
             bool padding = at > hole.Start + (2 * length) + 2;
             if (padding && at % 50 != 0) continue;
             if (!Reported(signed, at, at % 8)) missed.Add((at - hole.Start - 1) / 2);
         }
-        // What gets by lies in parts that the report lists; it names the signer, the time and the bytes as before.
         Assert.Contains("the further certificates carried along", before.NotSigned);
-        Assert.All(missed, at => Assert.True(at < length, "padding changed unnoticed"));
         Assert.Equal("", string.Join(",", missed));
     }
 

@@ -18,7 +18,7 @@ public class VerifierTests
     [InlineData(false)]
     public async Task Two_signatures_give_three_statements_each(bool checkerFirst)
     {
-        byte[] signed = await Signed.ByBoth(SampleSheet.WithStream(), checkerFirst);
+        byte[] signed = await Signed.ByBoth(HandMadeSheet.WithStream(), checkerFirst);
         var report = Verifier.Verify(signed);
         Assert.Equal(FileOrigin.InTheFormOfASheet, report.Origin);
         Assert.Equal("2 signatures", report.SignatureCountText);
@@ -43,7 +43,7 @@ public class VerifierTests
     [Fact]
     public void An_unsigned_sheet_has_no_signature()
     {
-        var report = Verifier.Verify(SampleSheet.WithTable());
+        var report = Verifier.Verify(HandMadeSheet.WithTable());
         Assert.Equal("no signature", report.SignatureCountText);
         Assert.Equal(["designer", "checker"], report.EmptyFields);
         Assert.Equal(FileOrigin.InTheFormOfASheet, report.Origin);
@@ -52,10 +52,10 @@ public class VerifierTests
     [Fact]
     public void A_pdf_without_our_fields_or_attachments_was_not_made_by_this_program()
     {
-        var noFields = Verifier.Verify(SampleSheet.WithoutFields());
+        var noFields = Verifier.Verify(HandMadeSheet.WithoutFields());
         Assert.Equal(FileOrigin.NotMadeByThisProgram, noFields.Origin);
         Assert.Contains("lacks a prepared signature field", noFields.OriginText, StringComparison.Ordinal);
-        var noFiles = Verifier.Verify(SampleSheet.WithoutAttachments());
+        var noFiles = Verifier.Verify(HandMadeSheet.WithoutAttachments());
         Assert.Equal(FileOrigin.NotMadeByThisProgram, noFiles.Origin);
         Assert.Contains("calculation.json and results.json", noFiles.OriginText, StringComparison.Ordinal);
     }
@@ -64,7 +64,7 @@ public class VerifierTests
     public async Task A_signature_under_another_root_is_by_an_unknown_issuer()
     {
         var stranger = TestAuthority.Foreign.Ecdsa("CN=Dana Designer");
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", stranger, TestAuthority.Foreign);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", stranger, TestAuthority.Foreign);
         var signature = Verifier.Verify(signed).Signatures.Single();
         Assert.Equal(UnchangedVerdict.Unchanged, signature.Unchanged.Verdict);
         Assert.Equal(WhoVerdict.UnknownIssuer, signature.Who.Verdict);
@@ -76,11 +76,11 @@ public class VerifierTests
     public async Task A_claimed_time_outside_the_certificates_dates_is_told()
     {
         var later = TestAuthority.Known.Ecdsa("CN=Later", from: new(2025, 1, 1, 0, 0, 0, TimeSpan.Zero));
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", later);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", later);
         Assert.Equal(WhoVerdict.KnownIssuer, Verifier.Verify(signed).Signatures.Single().Who.Verdict);
         // The root was made for 2020 to 2045; the same chain judged with a root of other dates would need another root, so the person's own dates are the ones tried.
         var brief = TestAuthority.Known.Ecdsa("CN=Brief", to: TestAuthority.SigningTime.AddDays(1));
-        byte[] sheet = SampleSheet.WithTable();
+        byte[] sheet = HandMadeSheet.WithTable();
         var request = Signed.Request(sheet, "designer", brief);
         byte[] good = (await Signer.SignAsync(sheet, request)).Bytes;
         Assert.Equal(WhoVerdict.KnownIssuer, Verifier.Verify(good).Signatures.Single().Who.Verdict);
@@ -94,7 +94,7 @@ public class VerifierTests
     public async Task A_signed_file_that_qpdf_rewrote_is_broken()
     {
         using var tool = new OutsideTool();
-        tool.Write("signed.pdf", await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer));
+        tool.Write("signed.pdf", await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer));
         Assert.Equal(0, tool.Run("qpdf", "--object-streams=preserve", "signed.pdf", "rewritten.pdf").ExitCode);
         var signature = Verifier.Verify(tool.Read("rewritten.pdf")).Signatures.Single();
         Assert.Equal(UnchangedVerdict.Broken, signature.Unchanged.Verdict);
@@ -110,7 +110,7 @@ public class VerifierTests
     [InlineData(10, "object 10 (a XObject) was changed")]
     public async Task An_update_after_the_signature_is_named(int number, string expected)
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         string body = number is 3 or 7 ? "<</Type/Page/Parent 2 0 R/MediaBox[0 0 10 10]>>" : "<</Type/XObject/Length 1>>\nstream\nX\nendstream";
         var changed = Changed(HandMadeUpdate.Append(signed, (number, body)));
         Assert.Contains(expected, changed, StringComparison.Ordinal);
@@ -119,7 +119,7 @@ public class VerifierTests
     [Fact]
     public async Task An_added_page_is_named_first()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         byte[] longer = HandMadeUpdate.Append(signed, (2, "<</Type/Pages/Count 2/Kids[3 0 R 90 0 R]>>"), (90, "<</Type/Page/Parent 2 0 R/MediaBox[0 0 595 842]>>"));
         Assert.StartsWith("Changed after signing: pages were added (1 before, 2 after)", Changed(longer), StringComparison.Ordinal);
     }
@@ -127,7 +127,7 @@ public class VerifierTests
     [Fact]
     public async Task Moving_a_signed_field_or_changing_its_look_is_named()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         string field = HandMadeUpdate.BodyOf(signed, 5);
         string moved = System.Text.RegularExpressions.Regex.Replace(field, @"/Rect ?\[[^\]]*\]", "/Rect[0 0 595 842]");
         Assert.NotEqual(field, moved);
@@ -141,7 +141,7 @@ public class VerifierTests
     [Fact]
     public async Task An_added_field_a_changed_catalog_and_a_stray_object_are_named()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         byte[] field = HandMadeUpdate.Append(signed, (4, "<</Fields[5 0 R 6 0 R 90 0 R]/SigFlags 3>>"), (90, "<</FT/Sig/T(owner)>>"));
         Assert.Contains("signature fields were added: owner", Changed(field), StringComparison.Ordinal);
         string catalog = HandMadeUpdate.BodyOf(signed, 1);
@@ -152,7 +152,7 @@ public class VerifierTests
     [Fact]
     public async Task An_object_slipped_in_where_the_signed_file_refers_to_nothing_is_named()
     {
-        byte[] trap = HandMadeUpdate.Append(SampleSheet.WithTable(), (3, "<</Type/Page/Parent 2 0 R/MediaBox[0 0 595 842]/Contents 90 0 R/Annots[5 0 R 6 0 R]>>"));
+        byte[] trap = HandMadeUpdate.Append(HandMadeSheet.WithTable(), (3, "<</Type/Page/Parent 2 0 R/MediaBox[0 0 595 842]/Contents 90 0 R/Annots[5 0 R 6 0 R]>>"));
         byte[] signed = await Signed.By(trap, "designer", TestAuthority.Designer);
         Assert.Equal(UnchangedVerdict.Unchanged, Verifier.Verify(signed).Signatures.Single().Unchanged.Verdict);
         Assert.Contains("object 90 was slipped in", Changed(HandMadeUpdate.Append(signed, (90, "<</Length 1>>\nstream\n \nendstream"))), StringComparison.Ordinal);
@@ -161,7 +161,7 @@ public class VerifierTests
     [Fact]
     public async Task A_store_of_certificates_may_follow_but_may_not_own_a_page()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         string catalog = HandMadeUpdate.BodyOf(signed, 1);
         byte[] stored = HandMadeUpdate.Append(signed, (1, catalog[..^2] + "/DSS 90 0 R>>"), (90, "<</Certs[91 0 R]/X 8 0 R>>"), (91, "<</Length 1>>\nstream\n \nendstream"));
         var unchanged = Verifier.Verify(stored).Signatures.Single().Unchanged;
@@ -174,8 +174,8 @@ public class VerifierTests
     [Fact]
     public async Task A_removed_or_replaced_signature_is_named_by_the_one_that_stays()
     {
-        byte[] signed = await Signed.ByBoth(SampleSheet.WithTable());
-        byte[] removed = HandMadeUpdate.Append(signed, (5, HandMadeUpdate.BodyOf(SampleSheet.WithTable(), 5)));
+        byte[] signed = await Signed.ByBoth(HandMadeSheet.WithTable());
+        byte[] removed = HandMadeUpdate.Append(signed, (5, HandMadeUpdate.BodyOf(HandMadeSheet.WithTable(), 5)));
         var report = Verifier.Verify(removed);
         Assert.Equal(["checker"], report.Signatures.Select(signature => signature.Field));
         Assert.Contains("the signature in the field designer was removed", report.Signatures.Single().Unchanged.Text, StringComparison.Ordinal);
@@ -184,7 +184,7 @@ public class VerifierTests
     [Fact]
     public async Task A_hole_wider_than_the_value_is_broken()
     {
-        byte[] signed = await Signed.By(SampleSheet.WithTable(), "designer", TestAuthority.Designer);
+        byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
         int at = signed.AsSpan().IndexOf("/ByteRange[0 "u8) + 13;
         string numbers = Encoding.ASCII.GetString(signed, at, 32);
         int[] parts = [.. numbers.Split(' ', StringSplitOptions.RemoveEmptyEntries).Select(part => int.Parse(part, CultureInfo.InvariantCulture))];
@@ -197,7 +197,7 @@ public class VerifierTests
     [Fact]
     public async Task The_archive_tells_the_latest_the_earlier_and_any_other_bytes()
     {
-        byte[] sheet = SampleSheet.WithStream();
+        byte[] sheet = HandMadeSheet.WithStream();
         byte[] first = await Signed.By(sheet, "designer", TestAuthority.Designer), second = await Signed.By(first, "checker", TestAuthority.Checker);
         ArchivedState[] states = [.. new[] { sheet, first, second }.Select(bytes => new ArchivedState(bytes.Length, Convert.ToHexStringLower(SHA256.HashData(bytes))))];
         Assert.Equal(ArchiveVerdict.Latest, Verifier.Verify(second, states).Archive!.Verdict);
@@ -214,7 +214,7 @@ public class VerifierTests
     [Fact]
     public async Task A_certified_file_may_be_signed_further()
     {
-        byte[] sheet = SampleSheet.WithTable();
+        byte[] sheet = HandMadeSheet.WithTable();
         byte[] certified = (await Signer.SignAsync(sheet, Signed.Request(sheet, "designer", TestAuthority.Designer) with { Certify = true })).Bytes;
         var report = Verifier.Verify(await Signed.By(certified, "checker", TestAuthority.Checker));
         Assert.All(report.Signatures, signature => Assert.Equal(UnchangedVerdict.Unchanged, signature.Unchanged.Verdict));
@@ -223,9 +223,9 @@ public class VerifierTests
     [Fact]
     public async Task Text_of_the_signer_is_shown_without_tricks()
     {
-        byte[] sheet = SampleSheet.WithTable();
+        byte[] sheet = HandMadeSheet.WithTable();
         byte[] forged = await CmsForgery.SignWithName(sheet, TestAuthority.Checker, "Eve\u202Egpj.\u0007");
-        Assert.Equal("Eve\uFFFDgpj.\uFFFD", Verifier.Verify(forged).Signatures.Single().StatedName);
+        Assert.Equal("Eve[U+202E]gpj.[U+0007]", Verifier.Verify(forged).Signatures.Single().StatedName);
     }
 
     private static string Changed(byte[] file)

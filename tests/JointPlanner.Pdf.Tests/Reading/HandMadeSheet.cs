@@ -5,7 +5,7 @@ using System.Text;
 namespace JointPlanner.Pdf.Tests.Reading;
 
 /// <summary>A small PDF made by hand in the form of a sheet: a page, two empty signature fields, two attachments. Independent of the program's own writer.</summary>
-internal sealed class SampleSheet
+internal sealed class HandMadeSheet
 {
     public const string CalculationText = """{"schema":"sample"}""";
     public const string ResultsText = """{"opening":"12.5 mm"}""";
@@ -13,7 +13,7 @@ internal sealed class SampleSheet
     /// <summary>Catalog 1, pages 2, page 3, form 4, designer 5, checker 6, information 7; the rest may be packed.</summary>
     private readonly SortedDictionary<int, byte[]> _objects = [];
 
-    private SampleSheet()
+    private HandMadeSheet()
     {
     }
 
@@ -46,9 +46,9 @@ internal sealed class SampleSheet
         return sheet.Table();
     }
 
-    private static SampleSheet Make()
+    private static HandMadeSheet Make()
     {
-        var sheet = new SampleSheet();
+        var sheet = new HandMadeSheet();
         sheet.Set(1, "<</Type/Catalog/Pages 2 0 R/AcroForm 4 0 R/Names<</EmbeddedFiles<</Names[(calculation.json)11 0 R(results.json)12 0 R]>>>>>>");
         sheet.Set(2, "<</Type/Pages/Count 1/Kids[3 0 R]>>");
         sheet.Set(3, "<</Type/Page/Parent 2 0 R/MediaBox[0 0 595 842]/Contents 8 0 R/Resources<</Font<</F 9 0 R>>>>/Annots[5 0 R 6 0 R]>>");

@@ -3,7 +3,7 @@ using System.Formats.Asn1;
 namespace JointPlanner.Pdf.Verifying;
 
 /// <summary>Checks the parts of a signature's value that the signature does not protect and that the platform does not look at.</summary>
-internal static class SignatureLayout
+internal static class SignatureEncoding
 {
     private const string SignedData = "1.2.840.113549.1.7.2";
     private const string Data = "1.2.840.113549.1.7.1";
