@@ -133,7 +133,7 @@ internal static class SampleSheet
         yield return new Heading(1, "Setting table") { Number = "3" };
         yield return new Paragraph("Enter the table with the effective temperature of the deck. Between two rows take the nearer one. Outside the table do not set.");
         yield return Table.Of("Table 2. Opening to set at joint A2", [new("Deck temperature (°C)", Align.Decimal), new("Opening (mm)", Align.Decimal), new("Least (mm)", Align.Decimal), new("Most (mm)", Align.Decimal), new("Set on the day"), new("By")],
-            Enumerable.Range(0, rows).Select(i => (IReadOnlyList<Words>)[Signed(i - 20), Fixed(68 - (0.77 * (i - 20))), Fixed(66 - (0.77 * (i - 20))), Fixed(70 - (0.77 * (i - 20))), "", ""]));
+            Enumerable.Range(0, rows).Select(i => (IReadOnlyList<Words>)[Signed(i - 20), Fixed(68 - (0.37 * (i - 20))), Fixed(66 - (0.37 * (i - 20))), Fixed(70 - (0.37 * (i - 20))), "", ""]));
     }
 
     private static IEnumerable<Block> End() =>

@@ -12,11 +12,11 @@ internal static class FormulaLayout
         List<Strip> strips = [.. LabelStrips(block, frame, quiet)];
         var formula = frame.Root.Child("Formula", alternative: frame.Set.Settable(block.Linear));
 
-        var lefts = block.Lines.Select(l => l.Left is null ? null : frame.Set.Formula(l.Left, look)).ToList();
+        var math = new MathSetter(frame.Set);
+        var lefts = block.Lines.Select(l => l.Left is null ? null : math.Set(l.Left, look)).ToList();
         var sign = Frame.Left + Indent + Math.Clamp(lefts.Max(l => l?.Width ?? 0), LeastLeft, frame.Width * 0.3) + AroundSign;
         var signWidth = block.Lines.Max(l => frame.Set.Width(frame.Set.Settable(l.Relation), look));
         var start = sign + signWidth + AroundSign;
-        var math = new MathSetter(frame.Set);
         for (var i = 0; i < block.Lines.Count; i++)
         {
             var line = block.Lines[i];
@@ -25,7 +25,9 @@ internal static class FormulaLayout
             for (var k = 0; k < rows.Count; k++)
             {
                 var relation = k == 0 && line.Relation.Length > 0 ? frame.Set.Text(line.Relation, look) : null;
-                var right = new ReadingPiece(rows[k].Piece, frame.Set.Settable(rows[k].Text));
+                var right = rows[k].Piece;
+                // One text for the whole line, so that it is copied and searched in one piece however high its fractions are.
+                var reading = frame.Set.Settable(k == 0 ? (line with { Right = MathNode.Upright(rows[k].Text) }).Linear : rows[k].Text.Trim());
                 var ascent = Math.Max(right.Ascent, Math.Max(relation?.Ascent ?? 0, k == 0 ? left?.Ascent ?? 0 : 0));
                 var descent = Math.Max(right.Descent, k == 0 ? left?.Descent ?? 0 : 0);
                 var first = k == 0;
@@ -33,12 +35,12 @@ internal static class FormulaLayout
                 {
                     var y = top + (BetweenLines / 2) + ascent;
                     formula.Enclose(new(canvas.Index, Frame.Left + Indent, top, frame.Right, top + ascent + descent + BetweenLines));
-                    canvas.For(formula, () =>
+                    canvas.For(formula, () => canvas.ReadAs(reading, () =>
                     {
                         if (first) left?.Paint(canvas, Math.Max(Frame.Left, sign - AroundSign - left.Width), y);
                         relation?.Paint(canvas, sign, y);
                         right.Paint(canvas, start, y);
-                    });
+                    }));
                 })
                 {
                     SpaceBefore = strips.Count == 0 ? 5 : 0,

@@ -12,6 +12,8 @@ internal sealed class MathSetter(TextSetter setter)
         MathText text => Letters(text, look),
         MathRow row => new RowPiece([.. row.Parts.Select(p => (Set(p, look), 0.0))]),
         Fraction fraction => new FractionPiece(Set(fraction.Top, Smaller(look, 0.94)), Set(fraction.Bottom, Smaller(look, 0.94)), look.Size, look.Grey),
+        // The power of an indexed symbol stands over its index, not behind it.
+        Script { Sub: null, Super: { } power, Base: Script { Super: null } indexed } => Set(indexed with { Super = power }, look),
         Script script => new ScriptPiece(
             Set(script.Base, look),
             script.Sub is null ? null : Set(script.Sub, Smaller(look, ScriptShare)),
@@ -35,8 +37,14 @@ internal sealed class MathSetter(TextSetter setter)
         foreach (var part in parts)
         {
             var partWidth = Set(part, look).Width;
-            // A break stands before the operator, so that the new line says how it goes on.
-            if (line.Count > 0 && used + partWidth + Following(parts, part, look) > width && part is MathText { Kind: MathKind.Operator }) Flush();
+            if (line.Count > 0 && used + partWidth > width && BreakIn(line) is var at and > 0)
+            {
+                var rest = line.Skip(at).ToList();
+                line.RemoveRange(at, line.Count - at);
+                Flush();
+                line.AddRange(rest);
+                used = rest.Sum(p => Set(p, look).Width);
+            }
             line.Add(part);
             used += partWidth;
         }
@@ -59,19 +67,20 @@ internal sealed class MathSetter(TextSetter setter)
         }
     }
 
-    // The width up to the next place where a line may break.
-    private double Following(List<MathNode> parts, MathNode part, TextLook look)
+    // A break stands before an operator, so that the new line says how it goes on; a sum breaks between its terms rather than within one.
+    private static int BreakIn(List<MathNode> line)
     {
-        var at = parts.FindIndex(p => ReferenceEquals(p, part));
-        return parts.Skip(at + 1).TakeWhile(p => p is not MathText { Kind: MathKind.Operator }).Sum(p => Set(p, look).Width);
+        var between = line.FindLastIndex(p => p is MathText { Kind: MathKind.Operator } sign && !Multiplies(sign.Text));
+        return between > 0 ? between : line.FindLastIndex(p => p is MathText { Kind: MathKind.Operator });
     }
+
+    private static bool Multiplies(string sign) => sign is "·" or "×" or "/" or "∕" or "÷";
 
     private IEnumerable<MathNode> Flat(MathNode node, TextLook look, double width) => node switch
     {
         MathRow row => row.Parts.SelectMany(p => Flat(p, look, width)),
         Parentheses brackets when Set(brackets, look).Width > width =>
             [MathNode.Upright("("), .. Flat(brackets.Inner, look, width), MathNode.Upright(")")],
-        MathText text => [text with { }],
         _ => [node],
     };
 
@@ -86,7 +95,7 @@ internal sealed class MathSetter(TextSetter setter)
         var letters = setter.Text(text.Text, look with { Style = style });
         if (text.Kind != MathKind.Operator) return letters;
         // Multiplication binds tighter than addition and relations, and looks so.
-        var space = look.Size * (text.Text is "·" or "×" or "/" or "∕" ? 0.14 : 0.24);
+        var space = look.Size * (Multiplies(text.Text) ? 0.14 : 0.24);
         return new RowPiece([(letters, space)], space);
     }
 

@@ -20,9 +20,7 @@ internal static class Measures
     public const double Ink = 0.08;
     public const double Quiet = 0.36;
     public const double Rule = 0.62;
-    public const double Faint = 0.8;
-    public const double Band = 0.955;
-    public const double Watermark = 0.92;
+    public const double Watermark = 0.94;
 
     public const double Hairline = 0.3;
     public const double ThinRule = 0.5;

@@ -10,7 +10,7 @@ internal sealed record TableCell(IReadOnlyList<Piece> Lines, double Left, double
 {
     public void PaintLine(PageCanvas canvas, int index, double top, double height)
     {
-        if (index >= Lines.Count || Lines[index].Width == 0) return;
+        if (index < 0 || index >= Lines.Count || Lines[index].Width == 0) return;
         var line = Lines[index];
         var x = Align switch
         {
