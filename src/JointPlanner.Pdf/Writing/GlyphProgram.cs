@@ -98,7 +98,12 @@ internal sealed class GlyphProgram
         Put16(profile, 4, count);
         var tables = new SortedDictionary<string, byte[]>(StringComparer.Ordinal)
         {
-            ["glyf"] = outlines.ToArray(), ["head"] = head, ["hhea"] = horizontal, ["hmtx"] = metrics, ["loca"] = places, ["maxp"] = profile,
+            ["glyf"] = outlines.ToArray(),
+            "head"] = head,
+            "hhea"] = horizontal,
+            "hmtx"] = metrics,
+            "loca"] = places,
+            "maxp"] = profile,
         };
         foreach (var hinting in new[] { "cvt ", "fpgm", "prep" })
         {
