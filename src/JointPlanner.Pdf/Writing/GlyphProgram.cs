@@ -99,11 +99,11 @@ internal sealed class GlyphProgram
         var tables = new SortedDictionary<string, byte[]>(StringComparer.Ordinal)
         {
             ["glyf"] = outlines.ToArray(),
-            "head"] = head,
-            "hhea"] = horizontal,
-            "hmtx"] = metrics,
-            "loca"] = places,
-            "maxp"] = profile,
+            ["head"] = head,
+            ["hhea"] = horizontal,
+            ["hmtx"] = metrics,
+            ["loca"] = places,
+            ["maxp"] = profile,
         };
         foreach (var hinting in new[] { "cvt ", "fpgm", "prep" })
         {
