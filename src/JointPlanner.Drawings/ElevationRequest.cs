@@ -26,7 +26,7 @@ public sealed record ElevationRequest
 public sealed record ElevationPaper(double WidthMm, double HeightMm, double LetterMm, double ColumnMm)
 {
     /// <summary>A wide screen at four pixels a millimetre, with the ledger below.</summary>
-    public static ElevationPaper Screen { get; } = new(300, 40, 3.3, 52);
+    public static ElevationPaper Screen { get; } = new(270, 38, 3.1, 48);
 
     /// <summary>A phone at four pixels a millimetre: the whole deck in view, columns are swiped.</summary>
     public static ElevationPaper Phone { get; } = new(92, 22, 3.2, 0);

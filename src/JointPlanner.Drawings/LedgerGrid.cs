@@ -39,6 +39,9 @@ public sealed class LedgerGrid
     /// <summary>Number of tracks.</summary>
     public int Count => edges.Count - 1;
 
+    /// <summary>True where something with this path stands on the elevation.</summary>
+    public bool Has(string path) => places.ContainsKey(path);
+
     /// <summary>First and last line of a column, counted from <paramref name="first"/> for the first track.</summary>
     public string Lines(string path, int first = 1)
     {

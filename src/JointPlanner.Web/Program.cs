@@ -19,6 +19,7 @@ builder.Services.AddHealthChecks();
 builder.Services.AddHttpContextAccessor();
 builder.Services.AddCascadingAuthenticationState();
 builder.Services.AddScoped<Preferences>();
+builder.Services.AddSingleton(new JointPlanner.Web.Rooms.Structure.PlanDesk(new Dictionary<string, JointPlanner.Engine.Bases.OwnerRuleSet>()));
 builder.Services.AddSingleton(DemoMode.From(builder.Configuration));
 builder.AddTrustedProxies();
 builder.AddArchive();

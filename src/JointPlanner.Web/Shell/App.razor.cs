@@ -7,7 +7,7 @@ namespace JointPlanner.Web.Shell;
 /// <summary>The page around every page. Account pages stay plain HTML: signing in needs an ordinary answer that can set the cookie.</summary>
 public sealed partial class App
 {
-    private RememberedPreferences preferences = new(false, UnitProfile.Metric);
+    private RememberedPreferences preferences = new(false, null);
 
     [CascadingParameter]
     private HttpContext HttpContext { get; set; } = null!;

@@ -4,13 +4,21 @@ using Microsoft.JSInterop;
 namespace JointPlanner.Web.Shell;
 
 /// <summary>Name, rooms, units, paper, person.</summary>
-public sealed partial class TopBar
+public sealed partial class TopBar : IDisposable
 {
     [Inject]
     private Preferences Preferences { get; set; } = null!;
 
     [Inject]
     private IJSRuntime Script { get; set; } = null!;
+
+    /// <inheritdoc/>
+    public void Dispose() => Preferences.Changed -= Redraw;
+
+    /// <inheritdoc/>
+    protected override void OnInitialized() => Preferences.Changed += Redraw;
+
+    private void Redraw() => InvokeAsync(StateHasChanged);
 
     private string Pressed(UnitProfile units) => Preferences.Units == units ? "true" : "false";
 

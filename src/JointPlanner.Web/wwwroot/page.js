@@ -3,11 +3,25 @@ window.jointPlanner = {
   remember: (name, value) => { document.cookie = `${name}=${value}; Path=/; Max-Age=31536000; SameSite=Lax`; },
   paper: value => { document.documentElement.dataset.theme = value; window.jointPlanner.remember('paper', value); },
 };
-document.addEventListener('click', event => {
-  const drawn = event.target.closest?.('.picture [data-path]');
-  if (!drawn) return;
+function follow(drawn) {
   const column = document.querySelector(`[data-column="${CSS.escape(drawn.dataset.path)}"]`);
   if (!column) return;
   column.scrollIntoView({ block: 'nearest', inline: 'center' });
   (column.querySelector('input, button, a') ?? column).focus();
+}
+document.addEventListener('click', event => {
+  const drawn = event.target.closest?.('.picture [data-path]');
+  if (drawn) follow(drawn);
+});
+document.addEventListener('keydown', event => {
+  const drawn = (event.key === 'Enter' || event.key === ' ') && event.target.closest?.('.picture [data-path]');
+  if (drawn) { event.preventDefault(); follow(drawn); return; }
+  if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
+  const key = event.key.toLowerCase();
+  const act = key === 'z' && !event.shiftKey ? 'undo' : key === 'y' || key === 'z' ? 'redo' : '';
+  const button = act && document.querySelector(`[data-act="${act}"]`);
+  if (!button) return;
+  // The page's own undo covers typing too; the browser's would fall out of step with it.
+  event.preventDefault();
+  button.click();
 });

@@ -1,0 +1,133 @@
+using JointPlanner.Engine;
+using JointPlanner.Engine.Plans;
+using JointPlanner.Exchange.Plans;
+using JointPlanner.Exchange.Printing;
+
+namespace JointPlanner.Web.Rooms.Structure;
+
+/// <summary>One open structure: the document as typed, its past states, and what follows from it. Parts of the page read it and write through it.</summary>
+public sealed class Workbench : IDisposable
+{
+    private readonly LiveCalculation<PlanDocument, Outcome> calculation;
+    private readonly PlanHistory history;
+    private StepPrinter? printer;
+    private (Result? Of, IReadOnlyDictionary<string, Engine.Formulas.Step>? Steps) keyed;
+    private (IReadOnlyList<Engine.Formulas.Step>? Steps, DisplayProfile? Profile) printed;
+
+    /// <summary>Opens a document.</summary>
+    /// <param name="document">As it was last saved.</param>
+    /// <param name="known">Codes and rule sets to choose from.</param>
+    /// <param name="compute">Reads and computes it.</param>
+    /// <param name="isReadOnly">True where the person may look and not write.</param>
+    public Workbench(PlanDocument document, KnownWords known, Func<PlanDocument, CancellationToken, Outcome> compute, bool isReadOnly)
+    {
+        (history, Known, IsReadOnly) = (new PlanHistory(document), known, isReadOnly);
+        calculation = new LiveCalculation<PlanDocument, Outcome>(compute);
+        Outcome = compute(document, CancellationToken.None);
+        Drawn = Outcome.Reading.Plan;
+    }
+
+    /// <summary>Codes and rule sets to choose from.</summary>
+    public KnownWords Known { get; }
+
+    /// <summary>True where the person may look and not write.</summary>
+    public bool IsReadOnly { get; }
+
+    /// <summary>The document as typed.</summary>
+    public PlanDocument Document => history.Current;
+
+    /// <summary>What follows from it.</summary>
+    public Outcome Outcome { get; private set; }
+
+    /// <summary>The last plan that could be read: the drawing keeps it while something typed is still wrong.</summary>
+    public Plan? Drawn { get; private set; }
+
+    /// <summary>Everything computed; null while a fault stands in the way.</summary>
+    public Result? Result => Outcome.Result;
+
+    /// <summary>The number under a result key; null where there is none.</summary>
+    public Engine.Formulas.Number? Find(string key)
+    {
+        if (Result is not { } result) return null;
+        if (!ReferenceEquals(keyed.Of, result)) keyed = (result, result.ByKey());
+        return keyed.Steps!.TryGetValue(key, out var step) ? new(step.Index, step.Value) : null;
+    }
+
+    /// <summary>What undo would take back.</summary>
+    public string? Undoable => history.Undoable;
+
+    /// <summary>What redo would do again.</summary>
+    public string? Redoable => history.Redoable;
+
+    /// <summary>Step whose derivation is unfolded; null for none.</summary>
+    public int? Unfolded { get; private set; }
+
+    /// <summary>Told after each change of document, outcome or unfolded number.</summary>
+    public event Action? Changed;
+
+    /// <summary>Told after each change of the document, for saving.</summary>
+    public event Action<PlanDocument>? Edited;
+
+    /// <summary>Writes a field's text as typed.</summary>
+    public Task Write(string path, string? text) => Take(Document.With(path, text), path);
+
+    /// <summary>Takes a changed document.</summary>
+    /// <param name="document">The document.</param>
+    /// <param name="act">What was changed, for undo.</param>
+    public async Task Take(PlanDocument document, string act)
+    {
+        if (IsReadOnly) return;
+        history.Edit(document, act);
+        await Recompute();
+    }
+
+    /// <summary>Ends a run of keys in one field.</summary>
+    public void Pause() => history.Pause();
+
+    /// <summary>Takes the last change back.</summary>
+    public Task Undo()
+    {
+        history.Undo();
+        return Recompute();
+    }
+
+    /// <summary>Does it again.</summary>
+    public Task Redo()
+    {
+        history.Redo();
+        return Recompute();
+    }
+
+    /// <summary>Ids of a list that were used at any time.</summary>
+    public IEnumerable<string> UsedIds(string list) => history.UsedIds(list);
+
+    /// <summary>Shows how a number came about, or folds it again.</summary>
+    public void Unfold(int step)
+    {
+        Unfolded = Unfolded == step || step < 0 ? null : step;
+        Changed?.Invoke();
+    }
+
+    /// <summary>Prints steps in the reader's units.</summary>
+    public StepPrinter Printer(DisplayProfile profile)
+    {
+        var steps = Result?.Steps ?? [];
+        if (printer is null || !ReferenceEquals(printed.Steps, steps) || printed.Profile != profile)
+            (printer, printed) = (new StepPrinter(steps, profile), (steps, profile));
+        return printer;
+    }
+
+    /// <inheritdoc/>
+    public void Dispose() => calculation.Dispose();
+
+    private async Task Recompute()
+    {
+        Edited?.Invoke(Document);
+        if (await calculation.Newest(Document) is not { } outcome) return;
+        Outcome = outcome;
+        Drawn = outcome.Reading.Plan ?? Drawn;
+        // Steps are counted anew with each calculation: an open derivation would show another number's way.
+        if (Unfolded >= (Result?.Steps.Count ?? 0)) Unfolded = null;
+        Changed?.Invoke();
+    }
+}
