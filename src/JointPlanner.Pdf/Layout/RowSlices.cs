@@ -3,7 +3,7 @@ namespace JointPlanner.Pdf.Layout;
 /// <summary>Cuts a table row into strips of one line each, so that a row higher than a page can part.</summary>
 internal sealed record RowSlices(IReadOnlyList<TableCell> Cells, double Left, double Right)
 {
-    public const double PadX = 4, PadY = 2.1;
+    public const double PadX = 5, PadY = 2.1;
 
     public TextLook Look { get; init; } = TextLook.Cell;
 
