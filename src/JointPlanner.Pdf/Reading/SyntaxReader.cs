@@ -202,20 +202,21 @@ internal sealed class SyntaxReader(byte[] data, int start, int end, NameTable na
         int from = Position++;
         int close = LiteralEnd(from);
         budget.KeepText(close - from);
-        var bytes = new List<byte>(Math.Min(close - from, 256));
+        var bytes = new byte[close - Position];
+        int length = 0;
         while (Position < close)
         {
             byte b = data[Position++];
             if (b == 13)
             {
                 if (Position < close && data[Position] == 10) Position++;
-                bytes.Add(10);
+                bytes[length++] = 10;
             }
-            else if (b == '\\') Escape(bytes, close);
-            else bytes.Add(b);
+            else if (b != '\\') bytes[length++] = b;
+            else if (Escaped(close) is { } meant) bytes[length++] = meant;
         }
         Position = close + 1;
-        return new PdfText([.. bytes], false, from, Position);
+        return new PdfText(bytes[..length], false, from, Position);
     }
 
     private int LiteralEnd(int from)
@@ -230,24 +231,26 @@ internal sealed class SyntaxReader(byte[] data, int start, int end, NameTable na
         throw PdfReadException.Malformed("a string does not end", from);
     }
 
-    private void Escape(List<byte> bytes, int close)
+    /// <summary>The byte that an escape means; null for a line that is only broken in the file.</summary>
+    private byte? Escaped(int close)
     {
         byte b = data[Position++];
         switch (b)
         {
-            case (byte)'n': bytes.Add(10); break;
-            case (byte)'r': bytes.Add(13); break;
-            case (byte)'t': bytes.Add(9); break;
-            case (byte)'b': bytes.Add(8); break;
-            case (byte)'f': bytes.Add(12); break;
-            case 10: break;
-            case 13: if (Position < close && data[Position] == 10) Position++; break;
+            case (byte)'n': return 10;
+            case (byte)'r': return 13;
+            case (byte)'t': return 9;
+            case (byte)'b': return 8;
+            case (byte)'f': return 12;
+            case 10: return null;
+            case 13:
+                if (Position < close && data[Position] == 10) Position++;
+                return null;
             case >= (byte)'0' and <= (byte)'7':
                 int value = b - '0';
                 for (int i = 0; i < 2 && Position < close && data[Position] is >= (byte)'0' and <= (byte)'7'; i++) value = value * 8 + (data[Position++] - '0');
-                bytes.Add((byte)(value & 255));
-                break;
-            default: bytes.Add(b); break;
+                return (byte)(value & 255);
+            default: return b;
         }
     }
 

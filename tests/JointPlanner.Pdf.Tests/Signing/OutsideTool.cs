@@ -7,14 +7,16 @@ internal sealed class OutsideTool : IDisposable
 {
     private readonly DirectoryInfo _folder = Directory.CreateTempSubdirectory("jointplanner-pdf-");
 
+    public string PathOf(string name) => Path.Combine(_folder.FullName, name);
+
     public string Write(string name, byte[] bytes)
     {
-        string path = Path.Combine(_folder.FullName, name);
+        string path = PathOf(name);
         File.WriteAllBytes(path, bytes);
         return path;
     }
 
-    public byte[] Read(string name) => File.ReadAllBytes(Path.Combine(_folder.FullName, name));
+    public byte[] Read(string name) => File.ReadAllBytes(PathOf(name));
 
     /// <summary>What the program printed, and its exit code. A program that is missing fails the test.</summary>
     public (int ExitCode, string Output) Run(string program, params string[] arguments)

@@ -10,7 +10,7 @@ public class EveryFlipTests
 {
     private static readonly Verifier Verifier = new(TestAuthority.Known.Roots);
 
-    private const int Step = 5;
+    private const int Step = 11, WideStep = 211, Told = 1500;
 
     [Theory]
     [InlineData(true)]
@@ -20,11 +20,12 @@ public class EveryFlipTests
         byte[] signed = await Signed.ByBoth(packed ? HandMadeSheet.WithStream() : HandMadeSheet.WithTable());
         var hole = LastHole(signed);
         var missed = new List<string>();
-        // With a step of 1 every byte is hit; that was run too, and takes a minute. Which bit is flipped moves on with the byte.
-        for (int at = 0; at < signed.Length; at += Step)
+        int[] ends = [.. PdfRevisions.Open(signed).All.Select(revision => revision.End)];
+        // Close together where the file is told how to be read, wide apart in the fonts. Which bit is flipped moves on with the byte.
+        // With a step of 1 every byte is hit; that was run once too, on the same sheets before their signatures brought fonts along.
+        for (int at = 0; at < signed.Length; at += Array.Exists(ends, end => at < end && at > end - Told) ? Step : WideStep)
         {
             if (at > hole.Start && at < hole.End - 1) continue;
-            if (IsInFirstHole(signed, at) && at % 11 != 0) continue; // a long stretch of like digits
             if (!Reported(signed, at, at % 8)) missed.Add(string.Create(CultureInfo.InvariantCulture, $"byte {at}, bit {at % 8}"));
         }
         Assert.Empty(missed);
@@ -55,12 +56,6 @@ public class EveryFlipTests
         var report = Verifier.Verify(flipped);
         return report.Origin != FileOrigin.InTheFormOfASheet || report.Signatures.Count == 0
             || report.Signatures.Any(signature => signature.Unchanged.Verdict != UnchangedVerdict.Unchanged || signature.Who.Verdict != WhoVerdict.KnownIssuer);
-    }
-
-    private static bool IsInFirstHole(byte[] signed, int at)
-    {
-        int first = signed.AsSpan().IndexOf("/Contents<"u8) + 9;
-        return at > first && at < first + signed.AsSpan(first).IndexOf((byte)'>');
     }
 
     private static SignatureHole LastHole(byte[] signed)
