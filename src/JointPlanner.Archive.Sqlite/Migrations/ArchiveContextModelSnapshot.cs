@@ -33,7 +33,7 @@ namespace JointPlanner.Archive.Sqlite.Migrations
                     b.Property<long>("At")
                         .HasColumnType("INTEGER");
 
-                    b.Property<Guid>("PersonId")
+                    b.Property<Guid?>("PersonId")
                         .HasColumnType("TEXT");
 
                     b.Property<string>("Subject")

@@ -4,7 +4,9 @@ namespace JointPlanner.Archive.Acts;
 public sealed class ActReceipt
 {
     public required Guid RequestId { get; init; }
-    public required Guid PersonId { get; init; }
+
+    /// <summary>Null when the act came through a field link.</summary>
+    public Guid? PersonId { get; init; }
     public required Act Act { get; init; }
     public required string Subject { get; init; }
     public required DateTimeOffset At { get; init; }

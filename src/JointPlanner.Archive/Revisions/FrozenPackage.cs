@@ -1,4 +1,5 @@
 using JointPlanner.Archive.Chains;
+using JointPlanner.Archive.Values;
 
 namespace JointPlanner.Archive.Revisions;
 
@@ -16,6 +17,9 @@ public sealed class FrozenPackage : ChainedRow
     public required string ResultsText { get; init; }
     public required string ResultsHash { get; init; }
     public required string EngineVersion { get; init; }
+
+    /// <summary>Whether both texts still give the hashes they were frozen with; computed from the texts each time.</summary>
+    public bool IsIntact => Fingerprint.Of(PackageText) == PackageHash && Fingerprint.Of(ResultsText) == ResultsHash;
 
     protected override void Write(ChainText text) => text
         .Add("revision", RevisionId).Add("designer", DesignerId).Add("package", PackageHash).Add("results", ResultsHash).Add("engine", EngineVersion);

@@ -12,7 +12,7 @@ using Npgsql.EntityFrameworkCore.PostgreSQL.Metadata;
 namespace JointPlanner.Archive.PostgreSql.Migrations
 {
     [DbContext(typeof(ArchiveContext))]
-    [Migration("20261201121508_Initial")]
+    [Migration("20261201123537_Initial")]
     partial class Initial
     {
         /// <inheritdoc />
@@ -41,7 +41,7 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                     b.Property<DateTimeOffset>("At")
                         .HasColumnType("timestamp with time zone");
 
-                    b.Property<Guid>("PersonId")
+                    b.Property<Guid?>("PersonId")
                         .HasColumnType("uuid");
 
                     b.Property<string>("Subject")

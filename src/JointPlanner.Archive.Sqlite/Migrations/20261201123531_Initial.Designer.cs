@@ -11,7 +11,7 @@ using Microsoft.EntityFrameworkCore.Storage.ValueConversion;
 namespace JointPlanner.Archive.Sqlite.Migrations
 {
     [DbContext(typeof(ArchiveContext))]
-    [Migration("20261201121502_Initial")]
+    [Migration("20261201123531_Initial")]
     partial class Initial
     {
         /// <inheritdoc />
@@ -36,7 +36,7 @@ namespace JointPlanner.Archive.Sqlite.Migrations
                     b.Property<long>("At")
                         .HasColumnType("INTEGER");
 
-                    b.Property<Guid>("PersonId")
+                    b.Property<Guid?>("PersonId")
                         .HasColumnType("TEXT");
 
                     b.Property<string>("Subject")

@@ -1,10 +1,9 @@
 ﻿using System;
 using Microsoft.EntityFrameworkCore.Migrations;
-using Npgsql.EntityFrameworkCore.PostgreSQL.Metadata;
 
 #nullable disable
 
-namespace JointPlanner.Archive.PostgreSql.Migrations
+namespace JointPlanner.Archive.Sqlite.Migrations
 {
     /// <inheritdoc />
     public partial class Initial : Migration
@@ -16,10 +15,10 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "AccountRoles",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    Name = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    NormalizedName = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    ConcurrencyStamp = table.Column<string>(type: "text", nullable: true)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Name = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    NormalizedName = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    ConcurrencyStamp = table.Column<string>(type: "TEXT", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -30,12 +29,12 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "ActReceipts",
                 columns: table => new
                 {
-                    RequestId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Act = table.Column<string>(type: "text", nullable: false),
-                    Subject = table.Column<string>(type: "text", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    Answer = table.Column<string>(type: "text", nullable: false)
+                    RequestId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    Act = table.Column<string>(type: "TEXT", nullable: false),
+                    Subject = table.Column<string>(type: "TEXT", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    Answer = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -46,23 +45,23 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "AuditEntries",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    What = table.Column<string>(type: "text", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: true),
-                    PersonName = table.Column<string>(type: "text", nullable: true),
-                    From = table.Column<string>(type: "text", nullable: false),
-                    Subject = table.Column<string>(type: "text", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: true),
-                    OrganisationId = table.Column<Guid>(type: "uuid", nullable: true),
-                    Detail = table.Column<string>(type: "text", nullable: true),
-                    SubjectChain = table.Column<string>(type: "text", nullable: true),
-                    HashBefore = table.Column<string>(type: "text", nullable: true),
-                    HashAfter = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    What = table.Column<string>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    PersonName = table.Column<string>(type: "TEXT", nullable: true),
+                    From = table.Column<string>(type: "TEXT", nullable: false),
+                    Subject = table.Column<string>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    OrganisationId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    Detail = table.Column<string>(type: "TEXT", nullable: true),
+                    SubjectChain = table.Column<string>(type: "TEXT", nullable: true),
+                    HashBefore = table.Column<string>(type: "TEXT", nullable: true),
+                    HashAfter = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -73,9 +72,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Blobs",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    Bytes = table.Column<byte[]>(type: "bytea", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Bytes = table.Column<byte[]>(type: "BLOB", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -86,9 +85,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "ChainTips",
                 columns: table => new
                 {
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -99,10 +98,10 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "DataProtectionKeys",
                 columns: table => new
                 {
-                    Id = table.Column<int>(type: "integer", nullable: false)
-                        .Annotation("Npgsql:ValueGenerationStrategy", NpgsqlValueGenerationStrategy.IdentityByDefaultColumn),
-                    FriendlyName = table.Column<string>(type: "text", nullable: true),
-                    Xml = table.Column<string>(type: "text", nullable: true)
+                    Id = table.Column<int>(type: "INTEGER", nullable: false)
+                        .Annotation("Sqlite:Autoincrement", true),
+                    FriendlyName = table.Column<string>(type: "TEXT", nullable: true),
+                    Xml = table.Column<string>(type: "TEXT", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -113,12 +112,12 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Organisations",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    Name = table.Column<string>(type: "text", nullable: false),
-                    IssuedBy = table.Column<string>(type: "text", nullable: false),
-                    DesignerSignatureRequired = table.Column<bool>(type: "boolean", nullable: false),
-                    CheckerSignatureRequired = table.Column<bool>(type: "boolean", nullable: false),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Name = table.Column<string>(type: "TEXT", nullable: false),
+                    IssuedBy = table.Column<string>(type: "TEXT", nullable: false),
+                    DesignerSignatureRequired = table.Column<bool>(type: "INTEGER", nullable: false),
+                    CheckerSignatureRequired = table.Column<bool>(type: "INTEGER", nullable: false),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -129,24 +128,24 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "People",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    Name = table.Column<string>(type: "text", nullable: false),
-                    Active = table.Column<bool>(type: "boolean", nullable: false),
-                    Administrator = table.Column<bool>(type: "boolean", nullable: false),
-                    UserName = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    NormalizedUserName = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    Email = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    NormalizedEmail = table.Column<string>(type: "character varying(256)", maxLength: 256, nullable: true),
-                    EmailConfirmed = table.Column<bool>(type: "boolean", nullable: false),
-                    PasswordHash = table.Column<string>(type: "text", nullable: true),
-                    SecurityStamp = table.Column<string>(type: "text", nullable: true),
-                    ConcurrencyStamp = table.Column<string>(type: "text", nullable: true),
-                    PhoneNumber = table.Column<string>(type: "text", nullable: true),
-                    PhoneNumberConfirmed = table.Column<bool>(type: "boolean", nullable: false),
-                    TwoFactorEnabled = table.Column<bool>(type: "boolean", nullable: false),
-                    LockoutEnd = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    LockoutEnabled = table.Column<bool>(type: "boolean", nullable: false),
-                    AccessFailedCount = table.Column<int>(type: "integer", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Name = table.Column<string>(type: "TEXT", nullable: false),
+                    Active = table.Column<bool>(type: "INTEGER", nullable: false),
+                    Administrator = table.Column<bool>(type: "INTEGER", nullable: false),
+                    UserName = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    NormalizedUserName = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    Email = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    NormalizedEmail = table.Column<string>(type: "TEXT", maxLength: 256, nullable: true),
+                    EmailConfirmed = table.Column<bool>(type: "INTEGER", nullable: false),
+                    PasswordHash = table.Column<string>(type: "TEXT", nullable: true),
+                    SecurityStamp = table.Column<string>(type: "TEXT", nullable: true),
+                    ConcurrencyStamp = table.Column<string>(type: "TEXT", nullable: true),
+                    PhoneNumber = table.Column<string>(type: "TEXT", nullable: true),
+                    PhoneNumberConfirmed = table.Column<bool>(type: "INTEGER", nullable: false),
+                    TwoFactorEnabled = table.Column<bool>(type: "INTEGER", nullable: false),
+                    LockoutEnd = table.Column<long>(type: "INTEGER", nullable: true),
+                    LockoutEnabled = table.Column<bool>(type: "INTEGER", nullable: false),
+                    AccessFailedCount = table.Column<int>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -157,11 +156,11 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "AccountRoleClaims",
                 columns: table => new
                 {
-                    Id = table.Column<int>(type: "integer", nullable: false)
-                        .Annotation("Npgsql:ValueGenerationStrategy", NpgsqlValueGenerationStrategy.IdentityByDefaultColumn),
-                    RoleId = table.Column<Guid>(type: "uuid", nullable: false),
-                    ClaimType = table.Column<string>(type: "text", nullable: true),
-                    ClaimValue = table.Column<string>(type: "text", nullable: true)
+                    Id = table.Column<int>(type: "INTEGER", nullable: false)
+                        .Annotation("Sqlite:Autoincrement", true),
+                    RoleId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    ClaimType = table.Column<string>(type: "TEXT", nullable: true),
+                    ClaimValue = table.Column<string>(type: "TEXT", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -178,13 +177,13 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Structures",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    OrganisationId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Name = table.Column<string>(type: "text", nullable: false),
-                    Zone = table.Column<string>(type: "text", nullable: false),
-                    CreatedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    ClosedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    OrganisationId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Name = table.Column<string>(type: "TEXT", nullable: false),
+                    Zone = table.Column<string>(type: "TEXT", nullable: false),
+                    CreatedAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    ClosedAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -201,18 +200,18 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Certificates",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Subject = table.Column<string>(type: "text", nullable: false),
-                    Fingerprint = table.Column<string>(type: "text", nullable: false),
-                    PublicKeyHash = table.Column<string>(type: "text", nullable: false),
-                    Encoded = table.Column<byte[]>(type: "bytea", nullable: false),
-                    ValidUntil = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    RegisteredAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    ConfirmedById = table.Column<Guid>(type: "uuid", nullable: true),
-                    ConfirmedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    RevokedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Subject = table.Column<string>(type: "TEXT", nullable: false),
+                    Fingerprint = table.Column<string>(type: "TEXT", nullable: false),
+                    PublicKeyHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Encoded = table.Column<byte[]>(type: "BLOB", nullable: false),
+                    ValidUntil = table.Column<long>(type: "INTEGER", nullable: false),
+                    RegisteredAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    ConfirmedById = table.Column<Guid>(type: "TEXT", nullable: true),
+                    ConfirmedAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    RevokedAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -229,21 +228,21 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Confirmations",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    OrganisationId = table.Column<Guid>(type: "uuid", nullable: false),
-                    ValueId = table.Column<string>(type: "text", nullable: false),
-                    Document = table.Column<string>(type: "text", nullable: false),
-                    Edition = table.Column<string>(type: "text", nullable: false),
-                    Place = table.Column<string>(type: "text", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonName = table.Column<string>(type: "text", nullable: false),
-                    Date = table.Column<DateOnly>(type: "date", nullable: false),
-                    DemonstrationOnly = table.Column<bool>(type: "boolean", nullable: false),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    OrganisationId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    ValueId = table.Column<string>(type: "TEXT", nullable: false),
+                    Document = table.Column<string>(type: "TEXT", nullable: false),
+                    Edition = table.Column<string>(type: "TEXT", nullable: false),
+                    Place = table.Column<string>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonName = table.Column<string>(type: "TEXT", nullable: false),
+                    Date = table.Column<DateOnly>(type: "TEXT", nullable: false),
+                    DemonstrationOnly = table.Column<bool>(type: "INTEGER", nullable: false),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -266,9 +265,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Memberships",
                 columns: table => new
                 {
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    OrganisationId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Role = table.Column<string>(type: "text", nullable: false)
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    OrganisationId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Role = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -291,11 +290,11 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "PersonClaims",
                 columns: table => new
                 {
-                    Id = table.Column<int>(type: "integer", nullable: false)
-                        .Annotation("Npgsql:ValueGenerationStrategy", NpgsqlValueGenerationStrategy.IdentityByDefaultColumn),
-                    UserId = table.Column<Guid>(type: "uuid", nullable: false),
-                    ClaimType = table.Column<string>(type: "text", nullable: true),
-                    ClaimValue = table.Column<string>(type: "text", nullable: true)
+                    Id = table.Column<int>(type: "INTEGER", nullable: false)
+                        .Annotation("Sqlite:Autoincrement", true),
+                    UserId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    ClaimType = table.Column<string>(type: "TEXT", nullable: true),
+                    ClaimValue = table.Column<string>(type: "TEXT", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -312,10 +311,10 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "PersonLogins",
                 columns: table => new
                 {
-                    LoginProvider = table.Column<string>(type: "text", nullable: false),
-                    ProviderKey = table.Column<string>(type: "text", nullable: false),
-                    ProviderDisplayName = table.Column<string>(type: "text", nullable: true),
-                    UserId = table.Column<Guid>(type: "uuid", nullable: false)
+                    LoginProvider = table.Column<string>(type: "TEXT", nullable: false),
+                    ProviderKey = table.Column<string>(type: "TEXT", nullable: false),
+                    ProviderDisplayName = table.Column<string>(type: "TEXT", nullable: true),
+                    UserId = table.Column<Guid>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -332,8 +331,8 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "PersonRoles",
                 columns: table => new
                 {
-                    UserId = table.Column<Guid>(type: "uuid", nullable: false),
-                    RoleId = table.Column<Guid>(type: "uuid", nullable: false)
+                    UserId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RoleId = table.Column<Guid>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -356,10 +355,10 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "PersonTokens",
                 columns: table => new
                 {
-                    UserId = table.Column<Guid>(type: "uuid", nullable: false),
-                    LoginProvider = table.Column<string>(type: "text", nullable: false),
-                    Name = table.Column<string>(type: "text", nullable: false),
-                    Value = table.Column<string>(type: "text", nullable: true)
+                    UserId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    LoginProvider = table.Column<string>(type: "TEXT", nullable: false),
+                    Name = table.Column<string>(type: "TEXT", nullable: false),
+                    Value = table.Column<string>(type: "TEXT", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -376,26 +375,26 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Readings",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Joint = table.Column<string>(type: "text", nullable: false),
-                    Device = table.Column<string>(type: "text", nullable: false),
-                    Point = table.Column<string>(type: "text", nullable: false),
-                    Date = table.Column<DateOnly>(type: "date", nullable: false),
-                    MeasuredAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    Zone = table.Column<string>(type: "text", nullable: true),
-                    Opening = table.Column<double>(type: "double precision", nullable: false),
-                    Direction = table.Column<string>(type: "text", nullable: false),
-                    Temperature = table.Column<double>(type: "double precision", nullable: true),
-                    Method = table.Column<string>(type: "text", nullable: true),
-                    Uncertainty = table.Column<double>(type: "double precision", nullable: true),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Source = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Joint = table.Column<string>(type: "TEXT", nullable: false),
+                    Device = table.Column<string>(type: "TEXT", nullable: false),
+                    Point = table.Column<string>(type: "TEXT", nullable: false),
+                    Date = table.Column<DateOnly>(type: "TEXT", nullable: false),
+                    MeasuredAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    Zone = table.Column<string>(type: "TEXT", nullable: true),
+                    Opening = table.Column<double>(type: "REAL", nullable: false),
+                    Direction = table.Column<string>(type: "TEXT", nullable: false),
+                    Temperature = table.Column<double>(type: "REAL", nullable: true),
+                    Method = table.Column<string>(type: "TEXT", nullable: true),
+                    Uncertainty = table.Column<double>(type: "REAL", nullable: true),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Source = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -418,12 +417,12 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Revisions",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Number = table.Column<int>(type: "integer", nullable: false),
-                    PlanText = table.Column<string>(type: "text", nullable: false),
-                    PlanHash = table.Column<string>(type: "text", nullable: false),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Number = table.Column<int>(type: "INTEGER", nullable: false),
+                    PlanText = table.Column<string>(type: "TEXT", nullable: false),
+                    PlanHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -440,9 +439,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "StructureAccess",
                 columns: table => new
                 {
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    OrganisationId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Role = table.Column<string>(type: "text", nullable: false)
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    OrganisationId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Role = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -465,15 +464,15 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "ConfirmationRevocations",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    ConfirmationId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Reason = table.Column<string>(type: "text", nullable: false),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    ConfirmationId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Reason = table.Column<string>(type: "TEXT", nullable: false),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -496,15 +495,15 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Drafts",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    BaseText = table.Column<string>(type: "text", nullable: false),
-                    Text = table.Column<string>(type: "text", nullable: false),
-                    SavedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    BinnedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    BaseText = table.Column<string>(type: "TEXT", nullable: false),
+                    Text = table.Column<string>(type: "TEXT", nullable: false),
+                    SavedAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    BinnedAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -533,16 +532,16 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "FieldLinks",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    TokenHash = table.Column<string>(type: "text", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Joint = table.Column<string>(type: "text", nullable: false),
-                    MadeById = table.Column<Guid>(type: "uuid", nullable: false),
-                    MadeAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    ExpiresAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    RevokedAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: true),
-                    Version = table.Column<long>(type: "bigint", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    TokenHash = table.Column<string>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Joint = table.Column<string>(type: "TEXT", nullable: false),
+                    MadeById = table.Column<Guid>(type: "TEXT", nullable: false),
+                    MadeAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    ExpiresAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    RevokedAt = table.Column<long>(type: "INTEGER", nullable: true),
+                    Version = table.Column<long>(type: "INTEGER", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -571,19 +570,19 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "FrozenPackages",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    DesignerId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PackageText = table.Column<string>(type: "text", nullable: false),
-                    PackageHash = table.Column<string>(type: "text", nullable: false),
-                    ResultsText = table.Column<string>(type: "text", nullable: false),
-                    ResultsHash = table.Column<string>(type: "text", nullable: false),
-                    EngineVersion = table.Column<string>(type: "text", nullable: false),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    DesignerId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PackageText = table.Column<string>(type: "TEXT", nullable: false),
+                    PackageHash = table.Column<string>(type: "TEXT", nullable: false),
+                    ResultsText = table.Column<string>(type: "TEXT", nullable: false),
+                    ResultsHash = table.Column<string>(type: "TEXT", nullable: false),
+                    EngineVersion = table.Column<string>(type: "TEXT", nullable: false),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -606,22 +605,22 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "PdfSegments",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Ordinal = table.Column<int>(type: "integer", nullable: false),
-                    BlobId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Length = table.Column<long>(type: "bigint", nullable: false),
-                    PrefixLength = table.Column<long>(type: "bigint", nullable: false),
-                    PrefixHash = table.Column<string>(type: "text", nullable: false),
-                    Field = table.Column<string>(type: "text", nullable: true),
-                    SignerId = table.Column<Guid>(type: "uuid", nullable: true),
-                    CertificateFingerprint = table.Column<string>(type: "text", nullable: true),
-                    PublicKeyHash = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Ordinal = table.Column<int>(type: "INTEGER", nullable: false),
+                    BlobId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Length = table.Column<long>(type: "INTEGER", nullable: false),
+                    PrefixLength = table.Column<long>(type: "INTEGER", nullable: false),
+                    PrefixHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Field = table.Column<string>(type: "TEXT", nullable: true),
+                    SignerId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    CertificateFingerprint = table.Column<string>(type: "TEXT", nullable: true),
+                    PublicKeyHash = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -650,16 +649,16 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "Remarks",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    About = table.Column<string>(type: "text", nullable: true),
-                    Text = table.Column<string>(type: "text", nullable: false),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    About = table.Column<string>(type: "TEXT", nullable: true),
+                    Text = table.Column<string>(type: "TEXT", nullable: false),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -682,16 +681,16 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "RevisionEdits",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PlanHashBefore = table.Column<string>(type: "text", nullable: false),
-                    PlanHashAfter = table.Column<string>(type: "text", nullable: false),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PlanHashBefore = table.Column<string>(type: "TEXT", nullable: false),
+                    PlanHashAfter = table.Column<string>(type: "TEXT", nullable: false),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -714,19 +713,19 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "StateEntries",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Ordinal = table.Column<int>(type: "integer", nullable: false),
-                    State = table.Column<string>(type: "text", nullable: false),
-                    Act = table.Column<string>(type: "text", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Reason = table.Column<string>(type: "text", nullable: true),
-                    SubjectHash = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Ordinal = table.Column<int>(type: "INTEGER", nullable: false),
+                    State = table.Column<string>(type: "TEXT", nullable: false),
+                    Act = table.Column<string>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Reason = table.Column<string>(type: "TEXT", nullable: true),
+                    SubjectHash = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -749,27 +748,27 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "SettingRecords",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    StructureId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Joint = table.Column<string>(type: "text", nullable: false),
-                    Device = table.Column<string>(type: "text", nullable: false),
-                    RevisionId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: true),
-                    FieldLinkId = table.Column<Guid>(type: "uuid", nullable: true),
-                    PersonName = table.Column<string>(type: "text", nullable: false),
-                    MeasuredAt = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    Zone = table.Column<string>(type: "text", nullable: false),
-                    HoldPoint = table.Column<string>(type: "text", nullable: false),
-                    HoldsAtMinimum = table.Column<bool>(type: "boolean", nullable: false),
-                    VerdictAtMinimum = table.Column<string>(type: "text", nullable: false),
-                    HoldsAtMaximum = table.Column<bool>(type: "boolean", nullable: false),
-                    VerdictAtMaximum = table.Column<string>(type: "text", nullable: false),
-                    Reason = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    StructureId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Joint = table.Column<string>(type: "TEXT", nullable: false),
+                    Device = table.Column<string>(type: "TEXT", nullable: false),
+                    RevisionId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    FieldLinkId = table.Column<Guid>(type: "TEXT", nullable: true),
+                    PersonName = table.Column<string>(type: "TEXT", nullable: false),
+                    MeasuredAt = table.Column<long>(type: "INTEGER", nullable: false),
+                    Zone = table.Column<string>(type: "TEXT", nullable: false),
+                    HoldPoint = table.Column<string>(type: "TEXT", nullable: false),
+                    HoldsAtMinimum = table.Column<bool>(type: "INTEGER", nullable: false),
+                    VerdictAtMinimum = table.Column<string>(type: "TEXT", nullable: false),
+                    HoldsAtMaximum = table.Column<bool>(type: "INTEGER", nullable: false),
+                    VerdictAtMaximum = table.Column<string>(type: "TEXT", nullable: false),
+                    Reason = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -804,15 +803,15 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "SettingAcceptances",
                 columns: table => new
                 {
-                    Id = table.Column<Guid>(type: "uuid", nullable: false),
-                    SettingRecordId = table.Column<Guid>(type: "uuid", nullable: false),
-                    PersonId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Reason = table.Column<string>(type: "text", nullable: true),
-                    Chain = table.Column<string>(type: "text", nullable: false),
-                    Position = table.Column<long>(type: "bigint", nullable: false),
-                    At = table.Column<DateTimeOffset>(type: "timestamp with time zone", nullable: false),
-                    PreviousHash = table.Column<string>(type: "text", nullable: false),
-                    Hash = table.Column<string>(type: "text", nullable: false)
+                    Id = table.Column<Guid>(type: "TEXT", nullable: false),
+                    SettingRecordId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    PersonId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Reason = table.Column<string>(type: "TEXT", nullable: true),
+                    Chain = table.Column<string>(type: "TEXT", nullable: false),
+                    Position = table.Column<long>(type: "INTEGER", nullable: false),
+                    At = table.Column<long>(type: "INTEGER", nullable: false),
+                    PreviousHash = table.Column<string>(type: "TEXT", nullable: false),
+                    Hash = table.Column<string>(type: "TEXT", nullable: false)
                 },
                 constraints: table =>
                 {
@@ -835,14 +834,14 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                 name: "SettingPoints",
                 columns: table => new
                 {
-                    SettingRecordId = table.Column<Guid>(type: "uuid", nullable: false),
-                    Ordinal = table.Column<int>(type: "integer", nullable: false),
-                    Place = table.Column<string>(type: "text", nullable: false),
-                    Opening = table.Column<double>(type: "double precision", nullable: false),
-                    Direction = table.Column<string>(type: "text", nullable: false),
-                    Temperature = table.Column<double>(type: "double precision", nullable: false),
-                    Method = table.Column<string>(type: "text", nullable: false),
-                    Uncertainty = table.Column<double>(type: "double precision", nullable: false)
+                    SettingRecordId = table.Column<Guid>(type: "TEXT", nullable: false),
+                    Ordinal = table.Column<int>(type: "INTEGER", nullable: false),
+                    Place = table.Column<string>(type: "TEXT", nullable: false),
+                    Opening = table.Column<double>(type: "REAL", nullable: false),
+                    Direction = table.Column<string>(type: "TEXT", nullable: false),
+                    Temperature = table.Column<double>(type: "REAL", nullable: false),
+                    Method = table.Column<string>(type: "TEXT", nullable: false),
+                    Uncertainty = table.Column<double>(type: "REAL", nullable: false)
                 },
                 constraints: table =>
                 {
