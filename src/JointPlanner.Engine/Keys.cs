@@ -34,6 +34,9 @@ public static class Keys
     public static string SetValue(string joint) => $"joint/{joint}/setting/set";
     public static string SetMinus(string joint) => $"joint/{joint}/setting/minus";
     public static string SetPlus(string joint) => $"joint/{joint}/setting/plus";
+    public static string SetAlong(string joint) => $"joint/{joint}/setting/set-along";
+    public static string SetMinusAlong(string joint) => $"joint/{joint}/setting/minus-along";
+    public static string SetPlusAlong(string joint) => $"joint/{joint}/setting/plus-along";
 #pragma warning restore CS1591
 
     /// <summary>The word for a cause in keys and files.</summary>

@@ -11,8 +11,10 @@ namespace JointPlanner.Engine.Fitting.Joints;
 /// </summary>
 internal static class GapRules
 {
-    private sealed record End(Limit Limit, Number Normal, Number? Toward)
+    private sealed record End(Limit Limit, Number Normal, Number? Toward, bool IsByRule = false)
     {
+        public bool IsAtInstallation => Toward is null && !IsByRule;
+
         public double Reach => Normal.Value + ((Limit.Bound == Bound.Lower ? 1 : -1) * (Toward?.Value ?? 0));
     }
 
@@ -29,7 +31,7 @@ internal static class GapRules
         foreach (var end in upper) yield return Pair(highest, end, movements);
         foreach (var end in lower.Where(e => e != highest)) yield return Pair(end, lowest, movements);
         if (byRule is null) yield break;
-        var set = new End(byRule, byRule.Value, null);
+        var set = new End(byRule, byRule.Value, null, IsByRule: true);
         yield return Pair(highest, set, movements);
         yield return Pair(set, lowest, movements);
     }
@@ -51,6 +53,6 @@ internal static class GapRules
         var allowed = derivation.Use(FamilyFormulas.MovementAllowed, "", upper.Normal, lower.Normal);
         var source = upper.Toward is null ? upper.Limit.Source : lower.Toward is null ? lower.Limit.Source : upper.Limit.Source;
         return SizeTrial.AtMost($"movement between {lower.Limit.Name} and {upper.Limit.Name}", Quantity.Movement, asked, allowed,
-            Measure.Normal, upper.Limit.JudgedBy ?? lower.Limit.JudgedBy, lower.Toward is null || upper.Toward is null, source);
+            Measure.Normal, upper.Limit.JudgedBy ?? lower.Limit.JudgedBy, lower.IsAtInstallation || upper.IsAtInstallation, source);
     }
 }

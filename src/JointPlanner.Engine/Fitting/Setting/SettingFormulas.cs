@@ -18,7 +18,9 @@ public static class SettingFormulas
     private static readonly Operand Middle = new("G_m", "middle of the window", Quantity.Opening);
     private static readonly Operand ByRule = new("G_rule", "opening by the rule, before rounding", Quantity.Opening);
     private static readonly Operand Step = new("δ", "step of rounding", Quantity.Opening);
+    private static readonly Operand OfTolerance = new("δ_t", "step of rounding of the tolerance", Quantity.Opening);
     private static readonly Operand Set = new("G_set", "opening to set, normal to the joint", Quantity.Opening);
+    private static readonly Operand SetAlong = new("W_set", "opening to set, along the road", Quantity.Opening);
     private static readonly Operand Reserve = new("U", "reserve for what cannot be known exactly on the day", Quantity.Movement);
     private static readonly Operand Sigmas = new("k_U", "standard deviations in the reserve", Quantity.Ratio);
     private static readonly Operand WindowRate = new("k_w", "slope of the window, normal to the joint, without factor", Quantity.Rate);
@@ -84,13 +86,33 @@ public static class SettingFormulas
 
     /// <summary>How much smaller.</summary>
     public static readonly Formula Minus = new(
-        "setting.minus", "t_−", "how much smaller than set the opening may be made", Quantity.Movement, [Set, Least, Reserve, Step],
-        RoundTo(Set - Least - Reserve, Step, Formulas.Rounding.TowardZero), OffSet, new(0.005, 1e-9, "own arithmetic", 0.047, 0.0398, 0.0016, 0.001));
+        "setting.minus", "t_−", "how much smaller than set the opening may be made", Quantity.Movement, [Set, Least, Reserve, OfTolerance],
+        RoundTo(Set - Least - Reserve, OfTolerance, Formulas.Rounding.TowardZero), OffSet, new(0.005, 1e-9, "own arithmetic", 0.047, 0.0398, 0.0016, 0.001));
 
     /// <summary>How much larger.</summary>
     public static readonly Formula Plus = new(
-        "setting.plus", "t_+", "how much larger than set the opening may be made", Quantity.Movement, [Greatest, Set, Reserve, Step],
-        RoundTo(Greatest - Set - Reserve, Step, Formulas.Rounding.TowardZero), OffSet, new(0.009, 1e-9, "own arithmetic", 0.0582, 0.047, 0.0016, 0.001));
+        "setting.plus", "t_+", "how much larger than set the opening may be made", Quantity.Movement, [Greatest, Set, Reserve, OfTolerance],
+        RoundTo(Greatest - Set - Reserve, OfTolerance, Formulas.Rounding.TowardZero), OffSet, new(0.009, 1e-9, "own arithmetic", 0.0582, 0.047, 0.0016, 0.001));
+
+    /// <summary>The value to set, measured along the road.</summary>
+    public static readonly Formula RoundedAlong = new(
+        "setting.rounded-along", "W_set", "opening to set, along the road", Quantity.Opening, [ByRule, Middle, Cos, Step],
+        Choose(ByRule, Relation.AtLeast, Middle,
+            RoundTo((ByRule / Cos) - (0.5 * Step), Step, Formulas.Rounding.Up),
+            RoundTo((ByRule / Cos) + (0.5 * Step), Step, Formulas.Rounding.Down)),
+        Rounding, new(0.053, 1e-9, "own arithmetic", 0.0475, 0.040, 0.9, 0.001));
+
+    /// <summary>How much smaller, along the road.</summary>
+    public static readonly Formula MinusAlong = new(
+        "setting.minus-along", "t_−", "how much smaller than set the opening may be made, along the road", Quantity.Movement,
+        [SetAlong, Least, Reserve, Cos, OfTolerance], RoundTo(SetAlong - ((Least + Reserve) / Cos), OfTolerance, Formulas.Rounding.TowardZero), OffSet,
+        new(0.007, 1e-9, "own arithmetic", 0.053, 0.0398, 0.0016, 0.9, 0.001));
+
+    /// <summary>How much larger, along the road.</summary>
+    public static readonly Formula PlusAlong = new(
+        "setting.plus-along", "t_+", "how much larger than set the opening may be made, along the road", Quantity.Movement,
+        [Greatest, SetAlong, Reserve, Cos, OfTolerance], RoundTo(((Greatest - Reserve) / Cos) - SetAlong, OfTolerance, Formulas.Rounding.TowardZero), OffSet,
+        new(0.009, 1e-9, "own arithmetic", 0.0582, 0.053, 0.0016, 0.9, 0.001));
 
     /// <summary>Drift that may still follow the setting.</summary>
     public static readonly Formula Drift = new(

@@ -26,6 +26,16 @@ public sealed record SettingRow(
     /// <summary>The middle of the window, rounded, shown beside an owner's rule that falls outside; null elsewhere and where not even it may be used.</summary>
     public Number? MidWindow { get; init; }
 
+    /// <summary>The same opening measured along the road, rounded there with tolerances of its own; null where no value is given, or where only measuring normal to the joint leaves a tolerance.</summary>
+    public RoundedOpening? Along { get; init; }
+
     /// <summary>The smaller of both tolerances, for those who print one; null where no value is given.</summary>
     public double? Both => Minus is { } minus && Plus is { } plus ? Math.Min(minus.Value, plus.Value) : null;
 }
+
+/// <summary>An opening to set in one direction of measure, after rounding.</summary>
+/// <param name="Set">Recommended opening, m.</param>
+/// <param name="Minus">How much smaller it may be made, m.</param>
+/// <param name="Plus">How much larger, m.</param>
+/// <param name="Step">Step to which it was rounded, m.</param>
+public sealed record RoundedOpening(Number Set, Number Minus, Number Plus, double Step);

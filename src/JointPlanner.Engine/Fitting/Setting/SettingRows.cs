@@ -29,32 +29,21 @@ public static class SettingRows
         var row = empty with { Window = window, Reserve = reserve, ByRule = byRule };
         if (window.IsEmpty) return row with { Refusal = SettingRefusals.NoWindow(demand, row) };
 
-        var choice = new RoundedChoice(window, reserve, middle, manner.RoundingStep);
-        if (choice.Of(byRule) is { } set) return Set(demand.Joint.Id, row, set, choice, derivation);
+        var choice = new RoundedChoice(demand.Joint.Id, window, reserve, middle, manner.RoundingStep);
+        if (choice.Normal(byRule, derivation) is { } set)
+            return row with
+            {
+                Set = set.Set,
+                Minus = set.Minus,
+                Plus = set.Plus,
+                Step = set.Step,
+                ByGauge = set.Step == RoundingLadder.Gauge,
+                Along = demand.CosSkew.Value == 1 ? set : choice.Along(byRule, demand.CosSkew, derivation),
+            };
         if (rule is MidWindow) return row with { Refusal = SettingRefusals.TooNarrow(demand, row) };
-        var beside = choice.Of(middle) is { } step ? derivation.Use(SettingFormulas.Rounded, "", middle, middle, Step(step, derivation)) : (Number?)null;
+        var beside = choice.Normal(middle, new Derivation(keepsSteps: false))?.Set;
         return row with { MidWindow = beside, Refusal = SettingRefusals.RuleOutside(demand, row, beside ?? middle) };
     }
-
-    private static SettingRow Set(string joint, SettingRow row, double rung, RoundedChoice choice, Derivation derivation)
-    {
-        var window = choice.Window;
-        var step = Step(rung, derivation);
-        var ofTolerance = rung == RoundingLadder.OfTolerance(rung) ? step : derivation.Table("δ_t", "step to which tolerances are rounded",
-            Quantity.Opening, RoundingLadder.OfTolerance(rung), Provenance.Derived("one step finer than that of the opening"), "");
-        var set = derivation.Use(SettingFormulas.Rounded, Keys.SetValue(joint), row.ByRule!.Value, choice.Middle, step);
-        return row with
-        {
-            Set = set,
-            Minus = derivation.Use(SettingFormulas.Minus, Keys.SetMinus(joint), set, window.Least, row.Reserve!.Value, ofTolerance),
-            Plus = derivation.Use(SettingFormulas.Plus, Keys.SetPlus(joint), window.Greatest, set, row.Reserve!.Value, ofTolerance),
-            Step = rung,
-            ByGauge = rung == RoundingLadder.Gauge,
-        };
-    }
-
-    private static Number Step(double rung, Derivation derivation) => derivation.Table("δ", "step to which the opening is rounded",
-        Quantity.Opening, rung, Provenance.Derived("the wanted step, or the next finer one with which the opening stays in the window"), "");
 
     private static Number Reserve(JointDemand demand, SettingManner manner, Derivation derivation)
     {
