@@ -15,25 +15,27 @@ public sealed record ParsedDocument(MapNode? Root, ImmutableArray<Fault> Faults)
 public static class DocumentParser
 {
     /// <summary>Reads a stream, never more of it than a document may have.</summary>
-    public static ParsedDocument Parse(Stream stream)
+    public static ParsedDocument Parse(Stream stream, DocumentLimits? limits = null)
     {
+        var most = (limits ?? DocumentLimits.OfPeople).MostBytes;
         var buffer = new byte[64 * 1024];
         using var read = new MemoryStream();
         int count;
-        while (read.Length <= DocumentLimits.Bytes && (count = stream.Read(buffer, 0, buffer.Length)) > 0) read.Write(buffer, 0, count);
-        return Parse(read.ToArray());
+        while (read.Length <= most && (count = stream.Read(buffer, 0, buffer.Length)) > 0) read.Write(buffer, 0, count);
+        return Parse(read.ToArray(), limits);
     }
 
     /// <summary>Reads UTF-8 bytes.</summary>
-    public static ParsedDocument Parse(ReadOnlySpan<byte> utf8)
+    public static ParsedDocument Parse(ReadOnlySpan<byte> utf8, DocumentLimits? limits = null)
     {
-        if (utf8.Length > DocumentLimits.Bytes)
-            return Whole("form.too-large", "The file is larger than 2 MiB.", "Allowed: up to 2 MiB (2 097 152 bytes).",
+        limits ??= DocumentLimits.OfPeople;
+        if (utf8.Length > limits.MostBytes)
+            return Whole("form.too-large", $"The file is larger than {limits.MostBytes >> 20} MiB.", $"Allowed: up to {limits.MostBytes >> 20} MiB.",
                 "Check that this is the right file; a plan of 200 joints takes a few hundred kB.");
         if (utf8.StartsWith(Encoding.UTF8.Preamble)) utf8 = utf8[Encoding.UTF8.Preamble.Length..];
         if (!Utf8.IsValid(utf8))
             return Whole("form.encoding", "The file is not UTF-8 text.", "Allowed: JSON in UTF-8.", "Save the file as UTF-8, or choose the right file.");
-        var walk = new Walk(utf8);
+        var walk = new Walk(utf8, limits);
         try
         {
             return walk.Root() is MapNode root
@@ -80,7 +82,7 @@ public static class DocumentParser
         public string Allowed => allowed;
     }
 
-    private ref struct Walk(ReadOnlySpan<byte> utf8)
+    private ref struct Walk(ReadOnlySpan<byte> utf8, DocumentLimits limits)
     {
         private Utf8JsonReader reader = new(utf8, new JsonReaderOptions { MaxDepth = 64 });
         private int items;
@@ -95,9 +97,9 @@ public static class DocumentParser
 
         private DocumentNode Node()
         {
-            if (reader.CurrentDepth >= DocumentLimits.Depth && reader.TokenType is JsonTokenType.StartObject or JsonTokenType.StartArray)
-                throw new LimitException("form.too-deep", $"Lists and groups stand more than {DocumentLimits.Depth} deep inside one another.",
-                    $"Allowed: up to {DocumentLimits.Depth} deep.");
+            if (reader.CurrentDepth >= limits.MostDepth && reader.TokenType is JsonTokenType.StartObject or JsonTokenType.StartArray)
+                throw new LimitException("form.too-deep", $"Lists and groups stand more than {limits.MostDepth} deep inside one another.",
+                    $"Allowed: up to {limits.MostDepth} deep.");
             return reader.TokenType switch
             {
                 JsonTokenType.StartObject => Map(),
@@ -122,7 +124,7 @@ public static class DocumentParser
                 var part = Node();
                 if (names.Add(name)) entries.Add(KeyValuePair.Create(name, part));
                 else repeated.Add(name);
-                if (entries.Count > DocumentLimits.Items) throw TooMany();
+                if (entries.Count > limits.MostItems) throw TooMany();
             }
             return new MapNode(entries.ToImmutable(), repeated.ToImmutable());
         }
@@ -132,14 +134,14 @@ public static class DocumentParser
             var list = ImmutableArray.CreateBuilder<DocumentNode>();
             while (reader.Read() && reader.TokenType != JsonTokenType.EndArray)
             {
-                if (++items > DocumentLimits.Items) throw TooMany();
+                if (++items > limits.MostItems) throw TooMany();
                 list.Add(Node());
             }
             return new ListNode(list.ToImmutable());
         }
 
-        private static LimitException TooMany() => new("form.too-many-items",
-            $"The file holds more than {DocumentLimits.Items} list items.", $"Allowed: up to {DocumentLimits.Items} list items in all.");
+        private readonly LimitException TooMany() => new("form.too-many-items",
+            $"The file holds more than {limits.MostItems} list items.", $"Allowed: up to {limits.MostItems} list items in all.");
 
         /// <summary>Half a character pair, written as an escape, is no text; it is kept as a mark that the check of characters finds.</summary>
         private readonly string Text()

@@ -20,37 +20,48 @@ public static class DocumentWriter
     };
 
     /// <summary>The document in UTF-8, with a line break at its end.</summary>
-    public static byte[] ToUtf8(FieldTable table, MapNode root)
+    public static byte[] ToUtf8(FieldTable table, MapNode root) => ToUtf8(InOrder(table, root));
+
+    /// <summary>The same for a document that stands in order already.</summary>
+    public static byte[] ToUtf8(MapNode root)
     {
         var buffer = new ArrayBufferWriter<byte>();
-        using (var writer = new Utf8JsonWriter(buffer, Options)) Map(writer, table, "", root);
+        using (var writer = new Utf8JsonWriter(buffer, Options)) Node(writer, root);
         buffer.Write("\n"u8);
         return buffer.WrittenSpan.ToArray();
     }
 
-    private static void Map(Utf8JsonWriter writer, FieldTable table, string pattern, MapNode map)
+    /// <summary>The document with its fields in the table's order; what the table does not know comes last, as it stood.</summary>
+    public static MapNode InOrder(FieldTable table, MapNode root) => (MapNode)InOrder(table, "", root);
+
+    private static DocumentNode InOrder(FieldTable table, string pattern, DocumentNode node)
     {
-        writer.WriteStartObject();
+        if (node is ListNode list) return new ListNode([.. list.Items.Select(item => InOrder(table, $"{pattern}/*", item))]);
+        if (node is not MapNode map) return node;
         var known = table.In(pattern).Select(f => f.Word).ToList();
-        var ordered = map.Entries.OrderBy(e => known.IndexOf(e.Key) is >= 0 and var place ? place : int.MaxValue);
-        foreach (var (name, part) in ordered)
-        {
-            writer.WritePropertyName(name);
-            Node(writer, table, pattern.Length == 0 ? name : $"{pattern}/{name}", part);
-        }
-        writer.WriteEndObject();
+        return new MapNode(
+        [
+            .. map.Entries.OrderBy(e => known.IndexOf(e.Key) is >= 0 and var place ? place : int.MaxValue)
+                .Select(e => KeyValuePair.Create(e.Key, InOrder(table, pattern.Length == 0 ? e.Key : $"{pattern}/{e.Key}", e.Value))),
+        ]);
     }
 
-    private static void Node(Utf8JsonWriter writer, FieldTable table, string pattern, DocumentNode node)
+    private static void Node(Utf8JsonWriter writer, DocumentNode node)
     {
         switch (node)
         {
             case MapNode map:
-                Map(writer, table, pattern, map);
+                writer.WriteStartObject();
+                foreach (var (name, part) in map.Entries)
+                {
+                    writer.WritePropertyName(name);
+                    Node(writer, part);
+                }
+                writer.WriteEndObject();
                 break;
             case ListNode list:
                 writer.WriteStartArray();
-                foreach (var item in list.Items) Node(writer, table, $"{pattern}/*", item);
+                foreach (var item in list.Items) Node(writer, item);
                 writer.WriteEndArray();
                 break;
             case TextNode text:

@@ -84,6 +84,9 @@ public sealed record ReferenceEntry(ImmutableArray<string> Lists) : Entry;
 /// <summary>The word false and nothing else.</summary>
 public sealed record FalseEntry : Entry;
 
+/// <summary>true or false.</summary>
+public sealed record TruthEntry : Entry;
+
 /// <summary>A group of fields.</summary>
 public sealed record GroupEntry : Entry
 {

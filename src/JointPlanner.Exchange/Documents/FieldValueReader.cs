@@ -26,6 +26,7 @@ public static class FieldValueReader
         RatioEntry entry => Ratio(field, entry, part),
         CountEntry entry => Count(field, entry, part),
         FalseEntry => part is TruthNode { Value: false } ? new(0, "false", []) : Wrong(field, "field.not-false", "Only false may stand here."),
+        TruthEntry => part is TruthNode { Value: { } truth } ? new(truth ? 1 : 0, truth ? "true" : "false", []) : Wrong(field, "field.not-truth", $"{field.Name}: true or false belongs here."),
         _ when part is not TextNode => Wrong(field, "field.not-text", $"{field.Name}: a text in quotation marks belongs here."),
         _ => Words(field, ((TextNode)part).Text, outsideWords),
     };
@@ -41,6 +42,7 @@ public static class FieldValueReader
         IdEntry => "Allowed: 1 to 24 of the characters a–z, 0–9 and hyphen.",
         ReferenceEntry r => $"Allowed: the id of one of the {string.Join(" or ", r.Lists)}.",
         FalseEntry => "Allowed: false.",
+        TruthEntry => "Allowed: true or false.",
         OutsideWordEntry o => $"Allowed: a known {o.Of.Replace('-', ' ')}.",
         _ => "Allowed: a group of fields.",
     };

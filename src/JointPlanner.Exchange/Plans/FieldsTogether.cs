@@ -88,8 +88,8 @@ internal sealed class FieldsTogether
     private void BasisWords(KnownWords known)
     {
         if (known.BasisOf(values.Text("basis/code")) is not { } basis) return;
-        Among("basis/setting-doubt", basis.Doubts.Select(Words.Of));
-        Among("basis/safety", basis.SafetyFormats.Select(Words.Of));
+        Among("basis/setting-doubt", basis.Doubts.Select(MemberWords.Of));
+        Among("basis/safety", basis.SafetyFormats.Select(MemberWords.Of));
 
         void Among(string path, IEnumerable<string> words)
         {

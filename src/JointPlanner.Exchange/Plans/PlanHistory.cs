@@ -1,3 +1,5 @@
+using JointPlanner.Exchange.Documents;
+
 namespace JointPlanner.Exchange.Plans;
 
 /// <summary>The states a plan has been through while being edited: undo and redo.</summary>
@@ -7,6 +9,7 @@ public sealed class PlanHistory
     public const int Depth = 500;
 
     private readonly LinkedList<(PlanDocument Document, string Act)> undone = new(), done = new();
+    private readonly HashSet<(string List, string Id)> forgotten = [];
     private bool isPaused;
 
     /// <summary>A history that starts with a document.</summary>
@@ -31,8 +34,8 @@ public sealed class PlanHistory
         if (ReferenceEquals(document, Current)) return;
         if (isPaused || done.Last?.Value.Act != act || undone.Count > 0) done.AddLast((Current, act));
         isPaused = false;
-        if (done.Count > Depth) done.RemoveFirst();
-        undone.Clear();
+        if (done.Count > Depth) Forget(done.First!);
+        while (undone.First is { } first) Forget(first);
         Current = document;
     }
 
@@ -47,7 +50,16 @@ public sealed class PlanHistory
 
     /// <summary>Ids that any state of this history has had, so that none is given twice.</summary>
     public IEnumerable<string> UsedIds(string listPath) =>
-        done.Concat(undone).Select(s => s.Document).Append(Current).SelectMany(d => d.Items(listPath)).Distinct();
+        done.Concat(undone).Select(s => s.Document).Append(Current).SelectMany(d => d.Items(listPath))
+            .Concat(forgotten.Where(f => f.List == listPath).Select(f => f.Id)).Distinct();
+
+    private void Forget(LinkedListNode<(PlanDocument Document, string Act)> state)
+    {
+        foreach (var list in PlanFields.Table.Fields.Where(f => f.Entry is ListEntry && PlanFields.Table.ItemsHaveIds(f.Pattern)).Select(f => f.Pattern))
+            foreach (var id in state.Value.Document.Items(list))
+                forgotten.Add((list, id));
+        state.List!.Remove(state);
+    }
 
     private void Move(LinkedList<(PlanDocument Document, string Act)> from, LinkedList<(PlanDocument Document, string Act)> to)
     {

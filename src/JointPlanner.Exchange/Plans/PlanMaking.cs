@@ -152,7 +152,7 @@ internal sealed class PlanMaking
         if (bearing.SettingTemperature is null)
             values.Default($"{path}/setting/temperature", "as the joint", bearing.Kind == BearingKind.Fixed
                 ? "a single fixed line does not travel: its setting state plays no part"
-                : $"nothing is given: taken as tied at zero shear when the joint was set ({(deck is null ? "deck" : Words.Of(deck.Kind))} deck)");
+                : $"nothing is given: taken as tied at zero shear when the joint was set ({(deck is null ? "deck" : MemberWords.Of(deck.Kind))} deck)");
     }
 
     private Joint Joint(string path, string id) => new()
@@ -175,5 +175,5 @@ internal sealed class PlanMaking
     };
 
     private T Word<T>(string path)
-        where T : struct, Enum => Words.Of<T>(values.Text(path));
+        where T : struct, Enum => MemberWords.Of<T>(values.Text(path));
 }

@@ -15,7 +15,7 @@ internal static partial class FeetAndInches
         var match = Compound.Match(plain);
         if (!match.Success) return null;
         var (feet, inchText) = (match.Groups["feet"].Value, match.Groups["inches"].Value);
-        var inches = NumberText.Take(inchText, out var rest, out _);
+        var inches = TypedNumber.Take(inchText, out var rest, out _);
         if (!match.Groups["mark"].Success)
             return Failed("the inches have no mark", $"Write {feet} ft {inchText} in.");
         if (!feet.All(char.IsAsciiDigit) || feet.Length > 9)

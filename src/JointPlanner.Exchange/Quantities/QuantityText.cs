@@ -23,16 +23,16 @@ public static class QuantityText
         var usual = likely ?? row.Metric;
         if (text.Length > LongestText)
             return Failed(row, "quantity.too-long", $"A text of {text.Length} characters is not {row.Words}.", "Write the number and its unit only.");
-        var plain = NumberText.Plain(text);
+        var plain = TypedNumber.Plain(text);
         if (plain.Length == 0)
             return Failed(row, "quantity.empty", "Nothing is given.", $"Write {row.Words}.");
         if (kind.Dimension == Unit.Metre.Dimension && FeetAndInches.Read(plain) is { } compound) return compound;
-        var number = NumberText.Take(plain, out var rest, out var readings);
+        var number = TypedNumber.Take(plain, out var rest, out var readings);
         if (readings.Length > 0) return Ambiguous(text, row, readings, rest);
         if (number is not { } value) return NotANumber(text, plain, row, usual);
         if (UnitTable.Find(rest, row) is not { } unit) return WrongUnit(plain, rest, row, usual, value);
         var si = unit.ToSi(value);
-        if (!double.IsFinite(si) || (value == 0 && NumberText.SaysMoreThanZero(plain)))
+        if (!double.IsFinite(si) || (value == 0 && TypedNumber.SaysMoreThanZero(plain)))
             return Failed(row, "quantity.not-finite", $"“{text}” is too large or too small to count with.", "Write a finite number.");
         if (kind == Quantity.Count && si != Math.Truncate(si))
             return Failed(row, "quantity.not-whole", $"“{text}” is not a whole number.", "Write a whole number.");

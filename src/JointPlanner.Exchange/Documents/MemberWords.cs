@@ -3,7 +3,7 @@ using System.Text;
 namespace JointPlanner.Exchange.Documents;
 
 /// <summary>Members of an enumeration as words in files: small letters with hyphens.</summary>
-public static class Words
+public static class MemberWords
 {
     /// <summary>The member of a word; the first member where the word is none, which the field's own check has said already.</summary>
     public static T Of<T>(string word)

@@ -8,7 +8,7 @@ namespace JointPlanner.Exchange.Quantities;
 /// A number as people type it, whatever the machine's culture: decimal point, or decimal comma where it cannot be a thousands separator;
 /// fractions ("6 1/2"); powers of ten ("12e-6", "12×10⁻⁶"). Thousands separators are refused, thin spaces between groups of three tolerated.
 /// </summary>
-internal static partial class NumberText
+internal static partial class TypedNumber
 {
     private const string SuperscriptDigits = "⁰¹²³⁴⁵⁶⁷⁸⁹";
     private static readonly Dictionary<char, string> Fractions = new()
