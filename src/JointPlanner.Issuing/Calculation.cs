@@ -1,0 +1,84 @@
+using System.Collections.Immutable;
+using JointPlanner.Codes;
+using JointPlanner.Engine;
+using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Plans;
+using JointPlanner.Exchange.Documents;
+using JointPlanner.Exchange.OwnerRules;
+using JointPlanner.Exchange.Packages;
+using JointPlanner.Exchange.Plans;
+using JointPlanner.Exchange.Printing;
+
+namespace JointPlanner.Issuing;
+
+/// <summary>
+/// A plan document taken all the way: read, judged, computed. What the screen shows while typing, what the command line prints and what
+/// is frozen come from here.
+/// </summary>
+public sealed record Calculation
+{
+    private Calculation(PlanReading reading, CodeBasis? basis, OwnerRulesReading? owner, Result? result) =>
+        (Reading, Basis, Owner, Result) = (reading, basis, owner, result);
+
+    /// <summary>What the document says: faults, defaults, the plan.</summary>
+    public PlanReading Reading { get; }
+
+    /// <summary>The code edition; null where the plan names none that is known.</summary>
+    public CodeBasis? Basis { get; }
+
+    /// <summary>The owner's rule set; null where the plan uses none.</summary>
+    public OwnerRulesReading? Owner { get; }
+
+    /// <summary>What was computed; null where faults stand in the way.</summary>
+    public Result? Result { get; }
+
+    /// <summary>Faults and warnings of the plan and of the rule set.</summary>
+    public ImmutableArray<Fault> Faults => [.. Reading.Faults, .. Owner?.Faults ?? []];
+
+    /// <summary>The display profile that the plan asks for.</summary>
+    public DisplayProfile Profile => ProfileOf(Reading.Document);
+
+    /// <summary>Computes a document with the rule sets of an installation.</summary>
+    /// <param name="document">The plan as it stands on the screen or in a file.</param>
+    /// <param name="shelf">The rule sets that the plan may name.</param>
+    /// <param name="cancellation">Stops between joints.</param>
+    public static Calculation Of(PlanDocument document, OwnerRuleShelf shelf, CancellationToken cancellation = default)
+    {
+        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All, OwnerRules = shelf.Ids }).Read(document);
+        var owner = shelf.Find(document.TextAt("basis/owner-rules") ?? "");
+        return Of(reading, owner, ProfileOf(document).SettingStep, cancellation);
+    }
+
+    /// <summary>Computes a package from itself alone: no shelf, no database.</summary>
+    public static Calculation Of(CalculationPackage package, CancellationToken cancellation = default)
+    {
+        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All }).Read(package.Plan);
+        return Of(reading, package.OwnerRules is { } rules ? OwnerRulesReader.Read(rules) : null, package.RoundingStep, cancellation);
+    }
+
+    /// <summary>Everything that can change a number of this calculation, by value.</summary>
+    /// <exception cref="InvalidOperationException">Nothing was computed.</exception>
+    public CalculationPackage Package(IEnumerable<Confirmation> confirmations) => new()
+    {
+        Plan = Reading.Document ?? throw new InvalidOperationException("There is no document to pack."),
+        OwnerRules = Owner?.Root,
+        CodeId = Basis?.Id ?? throw new InvalidOperationException("There is no code edition to pack."),
+        CodeRevision = Basis.Revision,
+        Units = Profile.Id,
+        RoundingStep = Profile.SettingStep,
+        EngineVersion = ProgramVersion.Number,
+        Confirmations = [.. confirmations.OrderBy(c => c.ValueId, StringComparer.Ordinal)],
+    };
+
+    private static Calculation Of(PlanReading reading, OwnerRulesReading? owner, double settingStep, CancellationToken cancellation)
+    {
+        var basis = Catalogue.Find(reading.Document?.TextAt("basis/code") ?? "");
+        var result = reading.Plan is { } plan && basis is not null
+            ? Movements.Of(plan, basis, owner?.Rules is { } rules ? new Owner(rules, settingStep) : null, cancellation)
+            : null;
+        return new Calculation(reading, basis, owner, result);
+    }
+
+    private static DisplayProfile ProfileOf(PlanDocument? document) =>
+        document?.TextAt("display") == DisplayProfile.Us.Id ? DisplayProfile.Us : DisplayProfile.Metric;
+}
