@@ -32,6 +32,13 @@ internal sealed class PdfRevisions
 
     public RevisionView View(int revision) => new(this, revision);
 
+    /// <summary>Reads every object of every revision once, each as its own revision saw it, so that none is left whose place or extent lies.</summary>
+    public void ReadEverything()
+    {
+        for (int i = 0; i < All.Count; i++)
+            foreach (int number in All[i].Entries.Keys) View(i).Object(number);
+    }
+
     internal PdfIndirect AtByte(int at, RevisionView view)
     {
         if (_atByte.TryGetValue(at, out var known)) return known;

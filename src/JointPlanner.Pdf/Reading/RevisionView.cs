@@ -22,25 +22,30 @@ internal sealed class RevisionView(PdfRevisions file, int index)
                 if (seen.Add(number) && entry.Kind != CrossReferenceKind.Free) yield return number;
     }
 
-    public CrossReference? Entry(int number)
-    {
-        for (int i = index; i >= 0; i--)
-            if (file.All[i].Entries.TryGetValue(number, out var entry)) return entry.Kind == CrossReferenceKind.Free ? null : entry;
-        return null;
-    }
+    public CrossReference? Entry(int number) => Find(number) is { } found && found.Entry.Kind != CrossReferenceKind.Free ? found.Entry : null;
 
     public PdfIndirect? Object(int number)
     {
-        if (Entry(number) is not { } entry) return null;
-        if (entry.Kind == CrossReferenceKind.InFile)
+        if (Find(number) is not { } place || place.Entry.Kind == CrossReferenceKind.Free) return null;
+        var (entry, since) = place;
+        if (entry.Kind == CrossReferenceKind.InStream)
         {
-            var found = file.AtByte(entry.Place, this);
-            if (found.Number != number || found.Generation != entry.Detail) throw PdfReadException.Malformed("another object stands where one is named", entry.Place);
-            if (found.End > Revision.CrossReferenceStart && found.Start != Revision.CrossReferenceStart) throw PdfReadException.Malformed("an object lies behind its revision's end", found.Start);
-            return found;
+            if (Entry(entry.Place) is not { Kind: CrossReferenceKind.InFile }) throw PdfReadException.Malformed("an object stream that is named is missing");
+            return new PdfIndirect(number, 0, file.InStream(Object(entry.Place)!, entry.Detail, number), 0, 0);
         }
-        if (Entry(entry.Place) is not { Kind: CrossReferenceKind.InFile }) throw PdfReadException.Malformed("an object stream that is named is missing");
-        return new PdfIndirect(number, 0, file.InStream(Object(entry.Place)!, entry.Detail, number), 0, 0);
+        var found = file.AtByte(entry.Place, this);
+        if (found.Number != number || found.Generation != entry.Detail) throw PdfReadException.Malformed("another object stands where one is named", entry.Place);
+        // Else bytes appended later could change what an earlier state shows, without a word in any later section.
+        if (found.End > since.CrossReferenceStart && found.Start != since.CrossReferenceStart)
+            throw PdfReadException.Malformed("an object reaches behind the end of its revision", found.Start);
+        return found;
+    }
+
+    private (CrossReference Entry, Revision Since)? Find(int number)
+    {
+        for (int i = index; i >= 0; i--)
+            if (file.All[i].Entries.TryGetValue(number, out var entry)) return (entry, file.All[i]);
+        return null;
     }
 
     /// <summary>Follows references to the value meant; null where it is missing, as ISO 32000-2, 7.3.10 wants it.</summary>

@@ -147,7 +147,14 @@ internal sealed class UpdateChanges
 
     private bool IsCertification(PdfValue? value) =>
         value is PdfDictionary { Entries.Count: 1 } permissions && permissions["DocMDP"] is PdfReference signature && _signatures.Contains(signature.Number)
-        && !FormFields.In(_before).Exists(field => field.IsFilled(_before));
+        && LeavesRoomForSignatures(_after.Dictionary(signature)) && !FormFields.In(_before).Exists(field => field.IsFilled(_before));
+
+    /// <summary>P = 1 would forbid the next signature too (ISO 32000-2, 12.8.2.2); 2, which stands where none is given, allows it.</summary>
+    private bool LeavesRoomForSignatures(PdfDictionary? signature)
+    {
+        var reference = _after.Array(signature?["Reference"])?.Items.Select(_after.Dictionary).FirstOrDefault(item => _after.Name(item?["TransformMethod"]) == "DocMDP");
+        return reference is not null && (_after.Whole(_after.Dictionary(reference["TransformParams"])?["P"]) ?? 2) == 2;
+    }
 
     private void StoreChanged(PdfValue? value)
     {

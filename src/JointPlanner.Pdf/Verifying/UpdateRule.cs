@@ -76,7 +76,9 @@ public static class UpdateRule
         if (uploaded.Length == same) return No(UploadRefusal.NothingAdded, "The upload is the archived file itself: nothing was signed.");
         try
         {
-            return Judge(PdfRevisions.Open(uploaded, limits, cancellation), same, field, registeredFingerprint, received);
+            var file = PdfRevisions.Open(uploaded, limits, cancellation);
+            file.ReadEverything();
+            return Judge(file, same, field, registeredFingerprint, received);
         }
         catch (PdfReadException e)
         {
@@ -99,7 +101,8 @@ public static class UpdateRule
         if (updates > 1) return No(UploadRefusal.SecondUpdate, Invariant($"The upload adds {updates} updates to the archived file; one signature is one update. Sign the downloaded file once and change nothing else."));
         var view = file.Last;
         var changes = UpdateChanges.Of(file, file.All.Count - 1);
-        var other = changes.Where(change => !change.IsAllowed).Select(change => change.Text).ToList();
+        // Stricter than for readers: a store of certificates may follow later, but is no part of signing.
+        var other = changes.Where(change => !change.IsAllowed || change.Kind == FileChangeKind.SecurityStore).Select(change => change.Text).ToList();
         if (other.Count > 0) return No(UploadRefusal.MoreThanASignature, $"The upload changes more than the signature field: {PlainText.List(other)}.");
         var before = FormFields.In(file.View(first)).Where(known => known.IsFilled(file.View(first))).Select(known => known.Number).ToHashSet();
         var signed = FormFields.In(view).Where(known => known.IsFilled(view) && !before.Contains(known.Number)).ToList();

@@ -36,6 +36,7 @@ public sealed class Verifier(X509Certificate2Collection trustedRoots, PdfReadLim
         try
         {
             var file = PdfRevisions.Open(pdf, limits, cancellation);
+            if (file.All.Count > 1) file.ReadEverything();
             var view = file.Last;
             var fields = FormFields.In(view);
             var (origin, text) = Origin(view, fields);

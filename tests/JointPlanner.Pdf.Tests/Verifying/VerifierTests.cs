@@ -159,6 +159,38 @@ public class VerifierTests
     }
 
     [Fact]
+    public async Task Bytes_appended_where_the_signed_table_of_contents_already_points_are_told()
+    {
+        // The signed state says that page 1's content stands behind its own end; an update that names nothing puts it there.
+        byte[] trap = HandMadeUpdate.Append(HandMadeSheet.WithTable(),
+            (3, "<</Type/Page/Parent 2 0 R/MediaBox[0 0 595 842]/Contents 90 0 R/Annots[5 0 R 6 0 R]>>"), (90, "<</Length 1>>\nstream\n \nendstream"));
+        byte[] signed = await Signed.By(trap, "designer", TestAuthority.Checker);
+        string information = HandMadeUpdate.BodyOf(signed, 7);
+        int truth = trap.AsSpan().IndexOf("90 0 obj"u8), lie = signed.Length + $"7 0 obj\n{information}\nendobj\n".Length;
+        signed = CmsForgery.Again(signed, TestAuthority.Checker, Entry(truth), Entry(lie));
+        byte[] sprung = HandMadeUpdate.Append(signed, (7, information + "\nendobj\n90 0 obj\n<</Length 1>>\nstream\nX\nendstream"));
+        Assert.Equal("90 0 obj", Encoding.ASCII.GetString(sprung, lie, 8));
+        var report = Verifier.Verify(sprung);
+        Assert.Equal(FileOrigin.NotReadable, report.Origin);
+        Assert.Contains("reaches behind the end of its revision", report.OriginText, StringComparison.Ordinal);
+
+        static string Entry(int place) => string.Create(CultureInfo.InvariantCulture, $"{place:D10} 00000 n");
+    }
+
+    [Fact]
+    public async Task A_certification_that_forbids_the_next_signature_is_named()
+    {
+        byte[] sheet = HandMadeSheet.WithTable();
+        byte[] certified = (await Signer.SignAsync(sheet, Signed.Request(sheet, "designer", TestAuthority.Designer) with { Certify = true })).Bytes;
+        byte[] strict = CmsForgery.Again(certified, TestAuthority.Designer, "/P 2/V", "/P 1/V");
+        string registered = CertificateRules.Fingerprint(TestAuthority.Designer);
+        Assert.True(UpdateRule.AcceptSignedUpload(sheet, certified, "designer", registered, TestAuthority.SigningTime).IsAccepted);
+        var answer = UpdateRule.AcceptSignedUpload(sheet, strict, "designer", registered, TestAuthority.SigningTime);
+        Assert.Equal(UploadRefusal.MoreThanASignature, answer.Refusal);
+        Assert.Contains("/Perms was added", answer.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public async Task A_store_of_certificates_may_follow_but_may_not_own_a_page()
     {
         byte[] signed = await Signed.By(HandMadeSheet.WithTable(), "designer", TestAuthority.Designer);
