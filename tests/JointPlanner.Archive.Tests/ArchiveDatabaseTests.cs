@@ -1,3 +1,4 @@
+using JointPlanner.Archive.People;
 using JointPlanner.Archive.PostgreSql;
 using JointPlanner.Archive.Sqlite;
 using JointPlanner.Archive.Tests.Databases;
@@ -63,7 +64,7 @@ public class ArchiveDatabaseTests
         async Task Seed(ArchiveContext context, CancellationToken cancel)
         {
             if (await context.Organisations.AnyAsync(cancel)) return;
-            context.Organisations.Add(new People.Organisation { Name = "Harbour Authority of Ostrand" });
+            context.Organisations.Add(new Organisation { Name = "Harbour Authority of Ostrand" });
             await context.SaveChangesAsync(cancel);
             Interlocked.Increment(ref seeded);
         }

@@ -85,9 +85,6 @@ public sealed class FieldLinks(IDbContextFactory<ArchiveContext> archive, ActDes
         return link is { RevokedAt: null } && link.ExpiresAt > clock.GetUtcNow() ? link : throw new NotFound("link");
     }
 
-    private static string? HashOf(string token)
-    {
-        Span<byte> bytes = stackalloc byte[TokenBytes + 3];
-        return token.Length <= 24 && Base64Url.TryDecodeFromChars(token, bytes, out var length) && length == TokenBytes ? Fingerprint.Of(bytes[..length]) : null;
-    }
+    private static string? HashOf(string token) =>
+        Base64Url.IsValid(token, out var length) && length == TokenBytes ? Fingerprint.Of(Base64Url.DecodeFromChars(token)) : null;
 }

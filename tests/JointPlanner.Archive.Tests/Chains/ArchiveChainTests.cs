@@ -1,4 +1,5 @@
 using JointPlanner.Archive.Chains;
+using JointPlanner.Archive.Setting;
 using JointPlanner.Archive.Tests.Databases;
 
 namespace JointPlanner.Archive.Tests.Chains;
@@ -84,7 +85,7 @@ public class ArchiveChainTests
         await using var world = await FullArchive.Make(kind);
         await using (var context = world.Archive.CreateDbContext())
         {
-            var planted = new Setting.Reading
+            var planted = new Reading
             {
                 StructureId = world.StructureId, Joint = "j9", Device = "none", Point = "axis", Date = new DateOnly(2031, 6, 1), Opening = 0.03, Direction = "along the deck",
                 PersonId = world.Kim.Id,
