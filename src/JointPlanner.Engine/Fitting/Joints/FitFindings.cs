@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
 
@@ -38,6 +39,15 @@ internal static class FitFindings
 
     public static Finding ChoiceDoesNotFit(string joint, SizeFit size, RuleCheck rule) => Rejected("fit-choice-does-not-fit", Severity.BlocksIssue, joint,
         $"The designer's choice, {Plain(size.Family)} {Plain(size.Size)}, does not fit. It fails by", rule);
+
+    /// <summary>The code's bounds that the owner's rules for the family chosen stand in for; null where there are none.</summary>
+    public static Finding? CodeLimitsReplaced(string joint, SizeFit size, OwnerRuleSet rules, CodeGapLimits code)
+    {
+        if (!rules.Families.Any(f => f.Family == size.Family && f.ReplacesCodeLimits)) return null;
+        var names = code.SingleGap.Concat(code.PerCell).Select(l => Plain(l.Name)).ToList();
+        return names.Count == 0 ? null : new Finding("fit-code-limits-replaced", Severity.Note, $"joints/{joint}",
+            $"The owner's limits of {Plain(size.Family)} stand in for the code's: {string.Join("; ", names)}.");
+    }
 
     private static Finding Rejected(string id, Severity severity, string joint, string start, RuleCheck rule) => new(id, severity, $"joints/{joint}",
         $"{start} {Plain(rule.Name)}: the joint asks {{0}}, {{1}} is allowed, {{2}} too much.",

@@ -25,6 +25,7 @@ public static class JointFitting
         var (chosen, byDesigner) = JointChoice.Among(ranked, demand, derivation);
         foreach (var finding in LeftOutFindings.Of(joint.Id, (chosen ?? ranked.SelectMany(f => f.Sizes).FirstOrDefault())?.Movements ?? []))
             derivation.Note(finding);
+        if (chosen is not null && FitFindings.CodeLimitsReplaced(joint.Id, chosen, rules, code) is { } replaced) derivation.Note(replaced);
         return new JointFit(ranked, chosen, byDesigner);
     }
 }

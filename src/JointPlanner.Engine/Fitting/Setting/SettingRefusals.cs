@@ -3,7 +3,7 @@ using JointPlanner.Engine.Formulas;
 
 namespace JointPlanner.Engine.Fitting.Setting;
 
-/// <summary>Why a row gives no value.</summary>
+/// <summary>Why a row gives no value, or another than the owner's rule.</summary>
 internal static class SettingRefusals
 {
     // A row at the very end of the range, reached through another scale, is off by the last bit.
@@ -38,6 +38,10 @@ internal static class SettingRefusals
     public static Finding RuleOutside(JointDemand demand, SettingRow row, Number middle) => Of(demand, "setting-rule-outside-window",
         "Do not set at {0} by the owner's rule: it gives {1}, and no value within the window from {2} to {3} is left after the reserve of {4}. The middle of the window would be {5}.",
         row, row.ByRule!.Value.Value, row.Window!.Least.Value, row.Window.Greatest.Value, row.Reserve!.Value.Value, middle.Value);
+
+    /// <summary>The owner's rule goes by a reference opening that nobody gives.</summary>
+    public static Finding NoReference(string joint, string family) => new("setting-no-reference", Severity.Warning, $"joints/{joint}",
+        $"The owner sets joints by a reference opening, but the rules for {family} give none. The middle of the window is recommended instead.");
 
     private static Finding Of(JointDemand demand, string id, string template, SettingRow row, params double[] openings) =>
         new(id, Severity.Warning, $"joints/{demand.Joint.Id}", template,

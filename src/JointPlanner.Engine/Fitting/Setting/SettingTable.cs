@@ -36,6 +36,8 @@ public sealed record SettingTable(
         var temperature = derivation.Given($"joints/{joint.Id}/setting/temperature", "T_set", "structure temperature at setting, as expected",
             Quantity.Temperature, joint.SettingTemperature);
         var row = SettingRows.At(temperature, design, size, manner, derivation);
+        if (RuleOpening.For(manner.Rule, size.ReferenceOpening) != manner.Rule)
+            derivation.Note(SettingRefusals.NoReference(joint.Id, size.Family));
         if (row.Refusal is { } refusal) derivation.Note(refusal with { Severity = Severity.BlocksIssue });
 
         var withoutSteps = new Derivation(keepsSteps: false);

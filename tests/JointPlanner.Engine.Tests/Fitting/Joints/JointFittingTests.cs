@@ -12,6 +12,8 @@ public sealed class JointFittingTests
         ("60", [("width", 0.060)]), ("100", [("width", 0.100)]));
     private static readonly FamilyRules Strip = Family("strip-seal", [("least-opening", 0.010)],
         ("60", [("greatest-opening", 0.060)]), ("80", [("greatest-opening", 0.080)]));
+    private static readonly FamilyRules Finger = Family("finger", [("least-overlap", 0.040), ("least-clearance", 0.025)],
+        ("150", [("finger-length", 0.150)]), ("300", [("finger-length", 0.300)]));
     private static readonly FamilyRules Modular = Family("modular",
         [("centre-beam-width", 0.080), ("least-cell-gap", 0.005), ("greatest-cell-gap", 0.080)], ("2", [("cells", 2)]), ("6", [("cells", 6)]));
 
@@ -47,6 +49,33 @@ public sealed class JointFittingTests
         Assert.All(fit.Families, f => Assert.Null(f.Best));
         var finding = Assert.Single(d.Findings, f => f.Severity == Severity.BlocksIssue);
         Assert.Equal(("fit-nothing", "joints/j1"), (finding.Id, finding.Path));
+    }
+
+    [Theory]
+    [InlineData("compression-seal")]
+    [InlineData("strip-seal")]
+    [InlineData("finger")]
+    [InlineData("modular")]
+    public void No_size_of_any_family_fits_a_joint_that_moves_too_far(string family)
+    {
+        var rules = new[] { Compression, Strip, Finger, Modular }.Single(f => f.Family == family);
+        var fit = Fit(Moving(0.1), Owner(rules), d).Families.Single();
+
+        Assert.Null(fit.Best);
+        Assert.Equal("fit-no-size", fit.Rejection!.Id);
+        Assert.All(fit.Sizes, s => Assert.True(s.RejectedBy!.Room < 0));
+        Assert.NotNull(Fit(Moving(0.3e-3), Owner(rules), d).Families.Single().Best);
+    }
+
+    [Fact]
+    public void Limits_of_the_code_that_the_owner_replaces_are_named()
+    {
+        var code = new CodeGapLimits([Limit("code's greatest gap", Bound.Upper, 0.040, Column.GapStrength, Measure.Along)], []);
+        Fit(Moving(0.5e-3), Owner(Strip with { ReplacesCodeLimits = true }), d, code: code);
+        var finding = Assert.Single(d.Findings);
+
+        Assert.Equal(("fit-code-limits-replaced", Severity.Note), (finding.Id, finding.Severity));
+        Assert.Contains("code's greatest gap", finding.Template, StringComparison.Ordinal);
     }
 
     [Fact]

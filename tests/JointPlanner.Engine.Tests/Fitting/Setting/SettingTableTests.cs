@@ -138,6 +138,17 @@ public sealed class SettingTableTests
     }
 
     [Fact]
+    public void A_reference_opening_that_nobody_gives_is_said_and_the_middle_recommended()
+    {
+        var size = Size(null, Limit("least", Bound.Lower, 0.010), Limit("greatest", Bound.Upper, 0.080));
+        var table = SettingTable.Of(Demand(d, Joint(10), [Thermal(d, 1e-3, -10, 30)]), [], [], _ => throw new InvalidOperationException("not asked"),
+            size, Manner(rule: new FixedReference(10, null)), d);
+
+        Assert.Equal("setting-no-reference", Assert.Single(d.Findings).Id);
+        Assert.Equal(0.045, table.Design.Set!.Value.Value, 1e-12);
+    }
+
+    [Fact]
     public void Between_two_steps_a_narrow_window_gets_the_next_finer_step_and_then_a_gauge()
     {
         // 30.4 to 31.6 mm: neither 30 nor 35 mm lies in it, 31 mm does
