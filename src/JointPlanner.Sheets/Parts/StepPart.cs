@@ -12,10 +12,11 @@ internal static class StepPart
     {
         yield return new Heading(1, "Steps") { Number = "8" };
         yield return new Paragraph(
-            "Numbers in square brackets name the step that a value comes from. A value that later steps use with more digits than are shown as its result says so.");
+            "Every step that a printed result rests on. Numbers in square brackets name the step that a value comes from. A value that later steps use with more digits than are shown as its result says so.");
         var printer = new StepPrinter(page.Result.Steps, page.Profile, NumberStyle.Sheet);
+        var counted = StepsThatCount.Of(page.Result);
         var values = new List<PrintedStep>();
-        foreach (var step in printer.All)
+        foreach (var step in counted.Order().Select(printer.Print))
         {
             if (step.Formula is null && step.Candidates.IsEmpty)
             {
