@@ -1,3 +1,4 @@
+using JointPlanner.Archive.Chains;
 using JointPlanner.Archive.People;
 using JointPlanner.Archive.PostgreSql;
 using JointPlanner.Archive.Sqlite;
@@ -97,6 +98,20 @@ public class ArchiveDatabaseTests
         Assert.Contains("owns the guarded table", refusal.Message, StringComparison.Ordinal);
         await owner.AssertReady(production: false);
         await new PostgreSqlArchive(roles.App).AssertReady(production: true);
+    }
+
+    [Fact]
+    public async Task The_granted_role_can_do_every_act()
+    {
+        await using var database = await TestDatabase.Empty(Kind.PostgreSql);
+        await using var roles = await Roles.Make(database);
+        await new PostgreSqlArchive(roles.Owner, roles.AppName).Migrate();
+        var world = await FullArchive.Fill(await World.On(database, new PostgreSqlArchive(roles.App)));
+        var draft = await world.Drafts.Open(world.Ines.Id, world.StructureId);
+        await world.Drafts.Bin(world.Ines.Id, draft.Id, draft.Version);
+        world.Clock.Now = world.Clock.Now.AddDays(31);
+        Assert.Equal(1, await world.Drafts.EmptyBin());
+        Assert.True((await ArchiveChain.Verify(world.Archive)).Whole);
     }
 
     [Fact]

@@ -112,7 +112,27 @@ public sealed class ArchiveScope : IAsyncDisposable
     public IQueryable<Organisation> Organisations() => _archive.Organisations.Where(organisation => Person.Administrator
         || organisation.Memberships.Any(member => member.PersonId == _me));
 
-    /// <summary>Memberships in those organisations.</summary>
+    /// <summary>Owners of the structures that the person may read, with their rule for issuing.</summary>
+    public IQueryable<Organisation> Owners()
+    {
+        var owners = Structures().Select(structure => structure.OrganisationId);
+        return _archive.Organisations.Where(organisation => owners.Contains(organisation.Id));
+    }
+
+    /// <summary>Names of the persons who stand under what this person may read, and of colleagues; nothing else of their accounts.</summary>
+    public async Task<IReadOnlyDictionary<Guid, string>> Names(CancellationToken cancel = default)
+    {
+        var colleagues = Memberships().Select(member => member.PersonId);
+        var acted = StateEntries().Select(row => row.PersonId);
+        var edited = Edits().Select(row => row.PersonId);
+        var remarked = Remarks().Select(row => row.PersonId);
+        var accepted = SettingAcceptances().Select(row => row.PersonId);
+        return await _archive.Users
+            .Where(person => person.Id == _me || colleagues.Contains(person.Id) || acted.Contains(person.Id) || edited.Contains(person.Id) || remarked.Contains(person.Id) || accepted.Contains(person.Id))
+            .ToDictionaryAsync(person => person.Id, person => person.Name, cancel);
+    }
+
+    /// <summary>Memberships in the person's organisations; all of them for an administrator.</summary>
     public IQueryable<Membership> Memberships() => _archive.Memberships.Where(member => Person.Administrator
         || _archive.Memberships.Any(mine => mine.PersonId == _me && mine.OrganisationId == member.OrganisationId));
 

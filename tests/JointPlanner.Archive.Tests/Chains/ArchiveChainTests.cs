@@ -1,6 +1,7 @@
 using JointPlanner.Archive.Chains;
 using JointPlanner.Archive.Setting;
 using JointPlanner.Archive.Tests.Databases;
+using Microsoft.EntityFrameworkCore;
 
 namespace JointPlanner.Archive.Tests.Chains;
 
@@ -50,6 +51,25 @@ public class ArchiveChainTests
         var report = await ArchiveChain.Verify(world.Archive);
         Assert.False(report.Whole);
         Assert.StartsWith(row + " ", report.FirstBreak!.Row, StringComparison.Ordinal);
+    }
+
+    /// <summary>The insider has the program's own code and gives the altered row a hash that fits it.</summary>
+    [Theory, BothDatabases]
+    public async Task A_row_altered_with_a_fitting_hash_shows_at_the_row_behind_it(Kind kind)
+    {
+        await using var world = await FullArchive.Make(kind);
+        await world.Database.DropGuards();
+        await using (var context = world.Archive.CreateDbContext())
+        {
+            var remark = await context.Remarks.SingleAsync();
+            context.Entry(remark).Property(row => row.Text).CurrentValue = "All good.";
+            context.Entry(remark).Property(row => row.Hash).CurrentValue = remark.ComputeHash();
+            await context.SaveChangesAsync();
+        }
+
+        var report = await ArchiveChain.Verify(world.Archive);
+        Assert.Contains("does not follow the one before it", report.FirstBreak!.What, StringComparison.Ordinal);
+        Assert.StartsWith("StateEntry ", report.FirstBreak.Row, StringComparison.Ordinal);
     }
 
     [Theory, BothDatabases]

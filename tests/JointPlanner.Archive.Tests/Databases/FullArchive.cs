@@ -19,9 +19,11 @@ public static class FullArchive
         ],
         Fits, atMaximum ?? Fits);
 
-    public static async Task<World> Make(Kind kind)
+    public static async Task<World> Make(Kind kind) => await Fill(await World.Make(kind));
+
+    /// <summary>Does every act once.</summary>
+    public static async Task<World> Fill(World world)
     {
-        var world = await World.Make(kind);
         await world.Frozen();
         var returned = await world.Return.Do(world.By(world.Otto), new ReturnRequest(world.RevisionId, [new("Again.")]));
         await world.Issued(returned.DraftId);

@@ -115,6 +115,13 @@ public sealed class TestDatabase : IAsyncDisposable
         await OnServer($"DROP DATABASE {_place} WITH (FORCE)");
     }
 
+    /// <summary>At the end of the run: nothing stays behind, also on a server that is not thrown away.</summary>
+    public static async Task ForgetTemplates()
+    {
+        foreach (var template in Templates.Values) await template.DisposeAsync();
+        Templates.Clear();
+    }
+
     public static async Task OnServer(string statement)
     {
         await using var connection = new NpgsqlConnection(ThrowawayPostgres.Server);

@@ -30,6 +30,7 @@ public sealed class ThrowawayPostgres : IAsyncLifetime
 
     public async ValueTask DisposeAsync()
     {
+        await TestDatabase.ForgetTemplates();
         NpgsqlConnection.ClearAllPools();
         if (_folder is null) return;
         await Run(Binary("pg_ctl"), "-D", Path.Combine(_folder, "data"), "-m", "immediate", "stop");

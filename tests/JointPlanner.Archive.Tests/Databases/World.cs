@@ -17,16 +17,17 @@ public sealed class World : IAsyncDisposable
 {
     public const string FirstPlan = """{"schema":"joint-plan/1","segments":[{"id":"s1","length":"40 m"},{"id":"s2","length":"35 m"}],"joints":[{"id":"j1","mark":"A"}]}""";
 
-    private World(TestDatabase database)
+    private World(TestDatabase database, ArchiveDatabase archive)
     {
         Database = database;
+        Archive = archive;
         Desk = new ActDesk(Archive, Clock);
         Audit = new AuditTrail(Archive, Clock);
         Links = new FieldLinks(Archive, Desk, Audit, Clock);
     }
 
     public TestDatabase Database { get; }
-    public ArchiveDatabase Archive => Database.Archive;
+    public ArchiveDatabase Archive { get; }
     public SetClock Clock { get; } = new();
     public ActDesk Desk { get; }
     public AuditTrail Audit { get; }
@@ -66,7 +67,14 @@ public sealed class World : IAsyncDisposable
 
     public static async Task<World> Make(Kind kind)
     {
-        var world = new World(await TestDatabase.Migrated(kind));
+        var database = await TestDatabase.Migrated(kind);
+        return await On(database, database.Archive);
+    }
+
+    /// <summary>The same on a database as the caller opened it.</summary>
+    public static async Task<World> On(TestDatabase database, ArchiveDatabase archive)
+    {
+        var world = new World(database, archive);
         await world.Populate();
         return world;
     }

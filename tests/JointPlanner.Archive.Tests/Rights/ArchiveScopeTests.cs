@@ -91,6 +91,20 @@ public class ArchiveScopeTests
     }
 
     [Theory, BothDatabases]
+    public async Task A_designer_knows_the_owner_of_the_structure_and_who_stands_under_it_by_name(Kind kind)
+    {
+        await using var world = await FullArchive.Make(kind);
+        await using var designer = await world.As(world.Ines);
+        Assert.Equal(world.Owner.Name, (await designer.Owners().SingleAsync()).Name);
+        var known = await designer.Names();
+        Assert.Equal("Mara Ekholm", known[world.Mara.Id]);
+        Assert.Equal(4, known.Count);
+        await using var stranger = await world.As(world.Stranger);
+        Assert.Empty(await stranger.Owners().ToListAsync());
+        Assert.Equal([world.Stranger.Id], (await stranger.Names()).Keys);
+    }
+
+    [Theory, BothDatabases]
     public async Task Nobody_reads_another_persons_draft(Kind kind)
     {
         await using var world = await World.Make(kind);
