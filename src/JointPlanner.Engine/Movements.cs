@@ -39,7 +39,8 @@ public sealed class Movements
         catch (MechanismException free)
         {
             movements.derivation.Note(new("not-held", Severity.Error, "bearings",
-                $"The deck can move along its axis at {free.Node.Name} without resistance: nothing but sliding bearings holds it there. Fix one line or give it pads."));
+                "The deck can move along its axis at station {0} without resistance: nothing but sliding bearings holds it there. Fix one line or give it pads.",
+                [(Quantity.Length, free.Node.Station)]));
         }
         catch (NotFiniteException broken)
         {

@@ -3,7 +3,7 @@ using System.Collections.Immutable;
 namespace JointPlanner.Engine.Frames;
 
 /// <summary>A point of the model that may move along the deck.</summary>
-/// <param name="Name">Name in listings, for instance main@42.5.</param>
+/// <param name="Name">Name in listings, for instance main#2: the second point of body main in station order.</param>
 /// <param name="Station">Station, m.</param>
 /// <param name="Unknown">Number of its unknown; −1 for a point that cannot move. Points tied rigidly share one.</param>
 public sealed record Node(string Name, double Station, int Unknown);

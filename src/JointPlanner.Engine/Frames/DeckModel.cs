@@ -100,7 +100,8 @@ public sealed class DeckModel
             var master = tied.MasterOf(place);
             var unknown = -1;
             if (!tied.IsHeld(place) && !unknowns.TryGetValue(master, out unknown)) unknowns[master] = unknown = unknowns.Count;
-            nodes[place] = new Node(FormattableString.Invariant($"{place.Body}@{place.Station}"), place.Station, unknown);
+            var within = nodes.Count(n => n.Key.Item1 == place.Body) + 1;
+            nodes[place] = new Node(FormattableString.Invariant($"{place.Body}#{within}"), place.Station, unknown);
         }
         return nodes;
     }

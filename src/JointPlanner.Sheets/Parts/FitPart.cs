@@ -24,7 +24,8 @@ internal static class FitPart
 
     private static Table Rules(SheetPage page, SizeFit size) => Table.Of($"{size.Family}, {size.Size}: every rule",
     [
-        new("Rule") { NamesRows = true }, new("Asked", Align.Right), new("Allowed", Align.Right), new("Share", Align.Right), new("Room left", Align.Right), new("Source"), new("Step"),
+        new("Rule") { NamesRows = true, WidthMm = 54 }, new("Asked", Align.Right), new("Allowed", Align.Right), new("Share", Align.Right), new("Room left", Align.Right),
+        new("Source") { WidthMm = 40 }, new("Step") { WidthMm = 13 },
     ], size.Rules.Select(r => (IReadOnlyList<Words>)
     [
         r.Name, page.WithUnit(r.Quantity, r.Value.Value), page.WithUnit(r.Quantity, r.Limit.Value), r.Share is { } share ? ShareText.Of(share) : "",

@@ -31,10 +31,12 @@ internal static class ModelPart
 
     private static Table Members(SheetPage page, ModelListing listing) => Table.Of("Members (points that move as one share a number; − does not move)",
     [
-        new("From") { NamesRows = true }, new("Unknown", Align.Right), new("To"), new("Unknown", Align.Right), new("Length", Align.Right), new("EA", Align.Right),
+        new("From") { NamesRows = true }, new("Station", Align.Right), new("Unknown", Align.Right), new("To"), new("Station", Align.Right), new("Unknown", Align.Right),
+        new("Length", Align.Right), new("EA", Align.Right),
     ], listing.Model.Members.Select(m => (IReadOnlyList<Words>)
     [
-        m.From.Name, Unknown(m.From.Unknown), m.To.Name, Unknown(m.To.Unknown), page.WithUnit(Quantity.Length, m.Length), page.WithUnit(Quantity.AxialStiffness, m.AxialStiffness),
+        m.From.Name, page.WithUnit(Quantity.Length, m.From.Station), Unknown(m.From.Unknown), m.To.Name, page.WithUnit(Quantity.Length, m.To.Station), Unknown(m.To.Unknown),
+        page.WithUnit(Quantity.Length, m.Length), page.WithUnit(Quantity.AxialStiffness, m.AxialStiffness),
     ]));
 
     private static Table Springs(SheetPage page, ModelListing listing) => Table.Of("Springs along the deck",

@@ -47,7 +47,7 @@ internal static class MovementPart
     [
         new("Cause") { NamesRows = true },
         new($"Opens by, {page.Unit(Quantity.Movement)}", Align.Decimal), new($"Closes by, {page.Unit(Quantity.Movement)}", Align.Decimal),
-        .. Shown.Select(c => new Pdf.Column(Said.Of(c), Align.Right)), new("Steps"),
+        .. Shown.Select(c => new Pdf.Column(Said.Of(c), Align.Right)), new("Steps") { WidthMm = 24 },
     ], joint.Movements.Select(m => (IReadOnlyList<Words>)
     [
         Said.Of(m.Cause), page.Number(Quantity.Movement, m.OpensBy.Value), page.Number(Quantity.Movement, m.ClosesBy.Value),

@@ -70,7 +70,7 @@ public sealed class ExpansionLengthsTests
         var plan = Of([Abutment("a1", 0), Abutment("a2", 60)], [Deck("deck", 0, 60)],
             [Free("b1", "deck", "a1", 0), Free("b2", "deck", "a2", 60)], Joint("j", "deck", "a2"));
         var fault = Assert.Throws<MechanismException>(() => Lengths(plan, "j"));
-        Assert.StartsWith("deck@", fault.Node.Name, StringComparison.Ordinal);
+        Assert.StartsWith("deck#", fault.Node.Name, StringComparison.Ordinal);
     }
 
     [Fact]

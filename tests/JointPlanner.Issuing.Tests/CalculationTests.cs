@@ -1,0 +1,55 @@
+using JointPlanner.Engine.Formulas;
+using JointPlanner.Exchange.Packages;
+
+namespace JointPlanner.Issuing.Tests;
+
+public sealed class CalculationTests
+{
+    [Theory]
+    [MemberData(nameof(SeedData.StructureNames), MemberType = typeof(SeedData))]
+    public void Every_demo_structure_computes_without_faults_and_only_memory_values_stand_before_issue(string name)
+    {
+        var calculation = Calculation.Of(SeedData.Structure(name), SeedData.Shelf);
+        Assert.Empty(calculation.Faults.Where(f => !f.IsWarning).Select(f => $"{f.Path}: {f.Wrong}"));
+        Assert.Empty(calculation.Result!.Findings.Where(f => f.Severity >= Severity.BlocksIssue).Select(f => f.Template));
+        Assert.All(calculation.Result.Joints, j => Assert.NotNull(j.Table?.Design.Set));
+        Assert.NotEmpty(calculation.Result.MemoryValues);
+        Assert.InRange(calculation.Result.Model!.Residual, 0, 1e-9);
+        Assert.All(calculation.Result.HandChecks, c => Assert.True(c.Agrees, c.What));
+    }
+
+    [Theory]
+    [MemberData(nameof(SeedData.StructureNames), MemberType = typeof(SeedData))]
+    public void A_package_alone_gives_the_same_results_bit_for_bit(string name)
+    {
+        var calculation = Calculation.Of(SeedData.Structure(name), SeedData.Shelf);
+        var bytes = calculation.Package([]).ToUtf8();
+        var again = Calculation.Of(PackageReader.Read(bytes).Package!);
+        Assert.Equal(Results(calculation, bytes), Results(again, bytes));
+    }
+
+    [Theory]
+    [MemberData(nameof(SeedData.StructureNames), MemberType = typeof(SeedData))]
+    public void Switching_the_display_changes_no_movement(string name)
+    {
+        var document = SeedData.Structure(name);
+        var other = document.With("display", document.TextAt("display") == "us" ? "metric" : "us");
+        var (a, b) = (Calculation.Of(document, SeedData.Shelf).Result!, Calculation.Of(other, SeedData.Shelf).Result!);
+        Assert.Equal(
+            a.Joints.SelectMany(j => j.Movements).Select(m => (m.OpensBy.Value, m.ClosesBy.Value)),
+            b.Joints.SelectMany(j => j.Movements).Select(m => (m.OpensBy.Value, m.ClosesBy.Value)));
+        Assert.Equal(document.ToUtf8(), other.With("display", document.TextAt("display")!).ToUtf8());
+    }
+
+    [Fact]
+    public void A_cause_that_nobody_gave_is_named_and_stops_the_issue()
+    {
+        var document = SeedData.Structure("sorrel-creek-crossing").Without("movements/m-j1-1");
+        var open = Calculation.Of(document, SeedData.Shelf).Result!.Findings.Single(f => f.Severity == Severity.BlocksIssue);
+        Assert.Equal("causes-not-included", open.Id);
+        Assert.Contains("live load", open.Template, StringComparison.Ordinal);
+    }
+
+    private static byte[] Results(Calculation calculation, byte[] package) =>
+        ResultsFile.ToUtf8(ResultsFile.Of(calculation.Result!, ProgramVersion.Number, ContentHash.Of(package)));
+}
