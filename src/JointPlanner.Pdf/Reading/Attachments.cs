@@ -13,7 +13,8 @@ public static class Attachments
         return In(PdfRevisions.Open(pdf, limits, cancellation).Last);
     }
 
-    internal static List<AttachedFile> In(RevisionView view) => [.. Specifications(view).Select(found => Unpack(view, found.Name, found.Specification))];
+    internal static List<AttachedFile> In(RevisionView view) =>
+        [.. Specifications(view).Select(found => Unpack(view, found.Name, found.Specification))];
 
     /// <summary>Names and file specifications, nothing unpacked.</summary>
     internal static List<(string Name, PdfDictionary Specification)> Specifications(RevisionView view)
@@ -24,7 +25,8 @@ public static class Attachments
         if (view.Dictionary(view.Catalog["Names"])?["EmbeddedFiles"] is { } tree) open.Push(tree);
         while (open.TryPop(out var next))
         {
-            if (next is PdfReference reference && !seen.Add(reference.Number)) throw PdfReadException.Malformed("its list of attachments runs in a circle");
+            if (next is PdfReference reference && !seen.Add(reference.Number))
+                throw PdfReadException.Malformed("its list of attachments runs in a circle");
             var node = view.Dictionary(next) ?? throw PdfReadException.Malformed("its list of attachments is broken");
             var names = view.Array(node["Names"])?.Items ?? [];
             for (int i = 0; i + 1 < names.Count; i += 2)
@@ -32,7 +34,8 @@ public static class Attachments
                 string name = view.Text(names[i]) ?? throw PdfReadException.Malformed("an attachment has no name");
                 var specification = view.Dictionary(names[i + 1]) ?? throw PdfReadException.Malformed("an attachment is missing");
                 if (found.Exists(other => other.Item1 == name)) throw PdfReadException.Malformed("two attachments have the same name");
-                if (found.Count == Most) throw new PdfReadException(PdfReadFailure.TooManyObjects, "The PDF carries more than 100 attachments.");
+                if (found.Count == Most)
+                    throw new PdfReadException(PdfReadFailure.TooManyObjects, "The PDF carries more than 100 attachments.");
                 found.Add((name, specification));
             }
             foreach (var kid in Enumerable.Reverse(view.Array(node["Kids"])?.Items ?? [])) open.Push(kid);

@@ -21,11 +21,13 @@ internal sealed class CrossReferenceReader(byte[] file, NameTable names, Reading
                 throw new PdfReadException(PdfReadFailure.TooManyRevisions, Text($"The PDF has more than {budget.Limits.Revisions} revisions."));
             var revision = ReadSection(next);
             if (revisions.Count == 0 && revision.End != file.Length) throw PdfReadException.Malformed("bytes follow its end", revision.End);
-            if (revisions.Count > 0 && revision.End > revisions[^1].CrossReferenceStart) throw PdfReadException.Malformed("two revisions overlap", revision.End);
+            if (revisions.Count > 0 && revision.End > revisions[^1].CrossReferenceStart)
+                throw PdfReadException.Malformed("two revisions overlap", revision.End);
             revisions.Add(revision);
             if (revision.Trailer["Prev"] is not { } value) break;
             int previous = Whole(value, "/Prev");
-            if (previous >= next) throw new PdfReadException(PdfReadFailure.RevisionsNotDescending, "A revision of the PDF names a later one as its predecessor.");
+            if (previous >= next)
+                throw new PdfReadException(PdfReadFailure.RevisionsNotDescending, "A revision of the PDF names a later one as its predecessor.");
             next = previous;
         }
         revisions.Reverse();
@@ -58,7 +60,8 @@ internal sealed class CrossReferenceReader(byte[] file, NameTable names, Reading
         if (trailer["XRefStm"] is not null) throw new PdfReadException(PdfReadFailure.Unsupported, "The PDF carries two tables of contents side by side (a hybrid file).");
         if (trailer["Root"] is not PdfReference) throw PdfReadException.Malformed("a trailer names no catalog", at);
         reader.Expect("startxref"u8);
-        if (reader.ReadInteger() != at) throw PdfReadException.Malformed("\"startxref\" does not name the section before it", reader.Position);
+        if (reader.ReadInteger() != at)
+            throw PdfReadException.Malformed("\"startxref\" does not name the section before it", reader.Position);
         int mark = reader.Position;
         while (mark < file.Length && SyntaxReader.IsWhite(file[mark])) mark++;
         budget.Work(mark - reader.Position);
@@ -96,7 +99,8 @@ internal sealed class CrossReferenceReader(byte[] file, NameTable names, Reading
         int size = Whole(stream.Dictionary["Size"], "/Size");
         var widths = Wholes(stream.Dictionary["W"], "/W");
         var index = stream.Dictionary["Index"] is null ? [0, size] : Wholes(stream.Dictionary["Index"], "/Index");
-        if (widths.Length != 3 || widths.Any(w => w > 8) || widths[1] == 0 || index.Length % 2 != 0) throw PdfReadException.Malformed("a cross-reference stream's layout makes no sense", at);
+        if (widths.Length != 3 || widths.Any(w => w > 8) || widths[1] == 0 || index.Length % 2 != 0)
+            throw PdfReadException.Malformed("a cross-reference stream's layout makes no sense", at);
         var data = StreamBytes.Unpack(file, stream, value => value, budget);
         int position = 0;
         for (int section = 0; section < index.Length; section += 2)
@@ -104,7 +108,8 @@ internal sealed class CrossReferenceReader(byte[] file, NameTable names, Reading
             {
                 long kind = widths[0] == 0 ? 1 : Field(data, ref position, widths[0]);
                 long place = Field(data, ref position, widths[1]), detail = Field(data, ref position, widths[2]);
-                if (kind is < 0 or > 2 || place > int.MaxValue || detail > int.MaxValue) throw PdfReadException.Malformed("a cross-reference stream's entry makes no sense", at);
+                if (kind is < 0 or > 2 || place > int.MaxValue || detail > int.MaxValue)
+                    throw PdfReadException.Malformed("a cross-reference stream's entry makes no sense", at);
                 Add(entries, index[section], i, kind == 0 ? default : new((CrossReferenceKind)kind, (int)place, (int)detail));
             }
         return stream.Dictionary;
@@ -113,7 +118,8 @@ internal sealed class CrossReferenceReader(byte[] file, NameTable names, Reading
     private void Add(Dictionary<int, CrossReference> entries, int first, int offset, CrossReference entry)
     {
         budget.Entry();
-        if (first > int.MaxValue - offset || !entries.TryAdd(first + offset, entry)) throw PdfReadException.Malformed("an object number stands twice in one cross-reference section");
+        if (first > int.MaxValue - offset || !entries.TryAdd(first + offset, entry))
+            throw PdfReadException.Malformed("an object number stands twice in one cross-reference section");
     }
 
     private static long Field(byte[] data, ref int position, int width)

@@ -42,7 +42,8 @@ internal sealed class PdfRevisions
     internal PdfIndirect AtByte(int at, RevisionView view)
     {
         if (_atByte.TryGetValue(at, out var known)) return known;
-        if (at <= 0 || at >= File.Length || File[at] is < (byte)'0' or > (byte)'9') throw PdfReadException.Malformed("no object stands where one is named", at);
+        if (at <= 0 || at >= File.Length || File[at] is < (byte)'0' or > (byte)'9')
+            throw PdfReadException.Malformed("no object stands where one is named", at);
         // A stream may give its length by a reference, which may lead back to it or on and on.
         if (_open.Count == DeepestDependence || !_open.Add(at)) throw PdfReadException.Malformed("an object depends on itself", at);
         var reader = new SyntaxReader(File, at, File.Length, _names, Budget);
@@ -54,7 +55,8 @@ internal sealed class PdfRevisions
     internal PdfValue InStream(PdfIndirect holder, int index, int number)
     {
         if (!_packed.TryGetValue(holder.Start, out var content)) _packed[holder.Start] = content = Unpack(holder);
-        if (index >= content.Numbers.Length || content.Numbers[index] != number) throw PdfReadException.Malformed("an object is not in the object stream that is named for it", holder.Start);
+        if (index >= content.Numbers.Length || content.Numbers[index] != number)
+            throw PdfReadException.Malformed("an object is not in the object stream that is named for it", holder.Start);
         return content.Values[index];
     }
 
@@ -64,7 +66,8 @@ internal sealed class PdfRevisions
         // Its head is read from direct values alone: a reference could lead into another object stream, and from there on and on.
         int count = Direct(stream, "N"), first = Direct(stream, "First");
         var data = StreamBytes.Unpack(File, stream, value => value, Budget);
-        if (count < 0 || count > Budget.Limits.Objects || first < 0 || first > data.Length) throw PdfReadException.Malformed("an object stream's head makes no sense", holder.Start);
+        if (count < 0 || count > Budget.Limits.Objects || first < 0 || first > data.Length)
+            throw PdfReadException.Malformed("an object stream's head makes no sense", holder.Start);
         var head = new SyntaxReader(data, 0, first, _names, Budget);
         var numbers = new int[count];
         var places = new int[count];
@@ -72,7 +75,8 @@ internal sealed class PdfRevisions
         {
             numbers[i] = head.ReadInteger();
             places[i] = head.ReadInteger();
-            if (places[i] > data.Length - first) throw PdfReadException.Malformed("an object stream's head points outside it", holder.Start);
+            if (places[i] > data.Length - first)
+                throw PdfReadException.Malformed("an object stream's head points outside it", holder.Start);
         }
         var values = new PdfValue[count];
         for (int i = 0; i < count; i++) values[i] = new SyntaxReader(data, first + places[i], data.Length, _names, Budget).ReadValue();

@@ -22,7 +22,8 @@ internal sealed class RevisionView(PdfRevisions file, int index)
                 if (seen.Add(number) && entry.Kind != CrossReferenceKind.Free) yield return number;
     }
 
-    public CrossReference? Entry(int number) => Find(number) is { } found && found.Entry.Kind != CrossReferenceKind.Free ? found.Entry : null;
+    public CrossReference? Entry(int number) =>
+        Find(number) is { } found && found.Entry.Kind != CrossReferenceKind.Free ? found.Entry : null;
 
     public PdfIndirect? Object(int number)
     {
@@ -30,11 +31,13 @@ internal sealed class RevisionView(PdfRevisions file, int index)
         var (entry, since) = place;
         if (entry.Kind == CrossReferenceKind.InStream)
         {
-            if (Entry(entry.Place) is not { Kind: CrossReferenceKind.InFile }) throw PdfReadException.Malformed("an object stream that is named is missing");
+            if (Entry(entry.Place) is not { Kind: CrossReferenceKind.InFile })
+                throw PdfReadException.Malformed("an object stream that is named is missing");
             return new PdfIndirect(number, 0, file.InStream(Object(entry.Place)!, entry.Detail, number), 0, 0);
         }
         var found = file.AtByte(entry.Place, this);
-        if (found.Number != number || found.Generation != entry.Detail) throw PdfReadException.Malformed("another object stands where one is named", entry.Place);
+        if (found.Number != number || found.Generation != entry.Detail)
+            throw PdfReadException.Malformed("another object stands where one is named", entry.Place);
         // Else bytes appended later could change what an earlier state shows, without a word in any later section.
         if (found.End > since.CrossReferenceStart && found.Start != since.CrossReferenceStart)
             throw PdfReadException.Malformed("an object reaches behind the end of its revision", found.Start);
@@ -68,7 +71,8 @@ internal sealed class RevisionView(PdfRevisions file, int index)
 
     public string? Text(PdfValue? value) => (Resolve(value) as PdfText)?.Characters();
 
-    public int? Whole(PdfValue? value) => Resolve(value) is PdfNumber { IsInteger: true, Value: >= 0 and <= int.MaxValue } number ? (int)number.Value : null;
+    public int? Whole(PdfValue? value) =>
+        Resolve(value) is PdfNumber { IsInteger: true, Value: >= 0 and <= int.MaxValue } number ? (int)number.Value : null;
 
     /// <summary>The packed bytes of a stream.</summary>
     public ReadOnlySpan<byte> Packed(PdfStream stream) => file.File.AsSpan(stream.Start, stream.Length);

@@ -134,7 +134,8 @@ internal sealed class SyntaxReader(byte[] data, int start, int end, NameTable na
             int b = data[Position++];
             if (b == '#')
             {
-                if (Position + 2 > end || Hex(data[Position]) < 0 || Hex(data[Position + 1]) < 0) throw PdfReadException.Malformed("# in a name needs two hexadecimal digits", from);
+                if (Position + 2 > end || Hex(data[Position]) < 0 || Hex(data[Position + 1]) < 0)
+                    throw PdfReadException.Malformed("# in a name needs two hexadecimal digits", from);
                 b = Hex(data[Position]) << 4 | Hex(data[Position + 1]);
                 Position += 2;
             }
@@ -166,11 +167,13 @@ internal sealed class SyntaxReader(byte[] data, int start, int end, NameTable na
         {
             SkipWhite();
             if (Position + 1 < end && data[Position] == '>' && data[Position + 1] == '>') break;
-            if (Position >= end || data[Position] != '/') throw PdfReadException.Malformed("a name expected as a dictionary's key", Position);
+            if (Position >= end || data[Position] != '/')
+                throw PdfReadException.Malformed("a name expected as a dictionary's key", Position);
             int at = Position;
             string key = Name();
             // Readers differ in which of two equal keys they believe; a file that needs the answer is not accepted.
-            if (!entries.TryAdd(key, ReadValue(depth + 1))) throw PdfReadException.Malformed($"the key /{key} stands twice in one dictionary", at);
+            if (!entries.TryAdd(key, ReadValue(depth + 1)))
+                throw PdfReadException.Malformed($"the key /{key} stands twice in one dictionary", at);
         }
         Position += 2;
         return new PdfDictionary(entries);

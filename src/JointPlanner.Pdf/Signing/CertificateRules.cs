@@ -25,12 +25,16 @@ public static class CertificateRules
     {
         ArgumentNullException.ThrowIfNull(certificate);
         string name = certificate.GetNameInfo(X509NameType.SimpleName, false);
-        if (!MaySign(certificate)) return (SigningRefusal.KeyUsage, $"The certificate of {name} is not made for signing documents: its key usage names neither digitalSignature nor nonRepudiation.");
+        if (!MaySign(certificate))
+            return (SigningRefusal.KeyUsage, $"The certificate of {name} is not made for signing documents: its key usage names neither digitalSignature nor nonRepudiation.");
         if (WeakKey(certificate) is { } weak) return (SigningRefusal.WeakCertificate, $"The certificate of {name} is refused: {weak}.");
-        if (WeakSignature(certificate)) return (SigningRefusal.WeakCertificate, $"The certificate of {name} is refused: it was issued with SHA-1 or MD5; SHA-256 or better is needed.");
+        if (WeakSignature(certificate))
+            return (SigningRefusal.WeakCertificate, $"The certificate of {name} is refused: it was issued with SHA-1 or MD5; SHA-256 or better is needed.");
         var (from, to) = (certificate.NotBefore.ToUniversalTime(), certificate.NotAfter.ToUniversalTime());
-        if (instant.UtcDateTime < from) return (SigningRefusal.CertificateNotYetValid, Invariant($"The certificate of {name} is valid only from {from:yyyy-MM-dd HH:mm:ss} UTC; the signing time is {instant.UtcDateTime:yyyy-MM-dd HH:mm:ss} UTC."));
-        if (instant.UtcDateTime > to) return (SigningRefusal.CertificateExpired, Invariant($"The certificate of {name} expired on {to:yyyy-MM-dd HH:mm:ss} UTC; the signing time is {instant.UtcDateTime:yyyy-MM-dd HH:mm:ss} UTC. Sign with a renewed certificate."));
+        if (instant.UtcDateTime < from)
+            return (SigningRefusal.CertificateNotYetValid, Invariant($"The certificate of {name} is valid only from {from:yyyy-MM-dd HH:mm:ss} UTC; the signing time is {instant.UtcDateTime:yyyy-MM-dd HH:mm:ss} UTC."));
+        if (instant.UtcDateTime > to)
+            return (SigningRefusal.CertificateExpired, Invariant($"The certificate of {name} expired on {to:yyyy-MM-dd HH:mm:ss} UTC; the signing time is {instant.UtcDateTime:yyyy-MM-dd HH:mm:ss} UTC. Sign with a renewed certificate."));
         return null;
     }
 
@@ -51,7 +55,8 @@ public static class CertificateRules
     }
 
     /// <summary>Two certificates are about the same key, whatever else they say.</summary>
-    internal static bool SameKey(X509Certificate2 a, X509Certificate2 b) => a.PublicKey.ExportSubjectPublicKeyInfo().AsSpan().SequenceEqual(b.PublicKey.ExportSubjectPublicKeyInfo());
+    internal static bool SameKey(X509Certificate2 a, X509Certificate2 b) =>
+        a.PublicKey.ExportSubjectPublicKeyInfo().AsSpan().SequenceEqual(b.PublicKey.ExportSubjectPublicKeyInfo());
 
     private static string Invariant(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);
 }

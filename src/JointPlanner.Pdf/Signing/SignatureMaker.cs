@@ -50,7 +50,8 @@ internal static class SignatureMaker
         {
             throw new SigningRefusedException(SigningRefusal.NoTimeStamp, $"The time-stamp server gave no time stamp ({e.Message}). Nothing was signed; try again later.", e);
         }
-        if (!token.VerifySignatureForSignerInfo(signer, out _)) throw new SigningRefusedException(SigningRefusal.NoTimeStamp, "The time stamp that came back does not fit the signature. Nothing was signed.");
+        if (!token.VerifySignatureForSignerInfo(signer, out _))
+            throw new SigningRefusedException(SigningRefusal.NoTimeStamp, "The time stamp that came back does not fit the signature. Nothing was signed.");
         return token.AsSignedCms().Encode();
     }
 

@@ -25,8 +25,10 @@ public static class Signer
         CheckTexts(request);
         if (!string.Equals(Convert.ToHexString(SHA256.HashData(pdf)), request.ExpectedSha256, StringComparison.OrdinalIgnoreCase))
             throw new SigningRefusedException(SigningRefusal.OtherBytes, "The file is not the one that was shown for signing: its SHA-256 differs. Load the sheet again.");
-        if (!request.Certificate.HasPrivateKey) throw new SigningRefusedException(SigningRefusal.NoPrivateKey, "The certificate comes without its private key, so it cannot sign.");
-        if (CertificateRules.Fault(request.Certificate, request.Instant) is { } fault) throw new SigningRefusedException(fault.Refusal, fault.Text);
+        if (!request.Certificate.HasPrivateKey)
+            throw new SigningRefusedException(SigningRefusal.NoPrivateKey, "The certificate comes without its private key, so it cannot sign.");
+        if (CertificateRules.Fault(request.Certificate, request.Instant) is { } fault)
+            throw new SigningRefusedException(fault.Refusal, fault.Text);
         UpdateWriter update;
         int signature, room;
         try
@@ -51,7 +53,8 @@ public static class Signer
         foreach (var (name, text) in new[] { ("name", request.SignerName), ("reason", request.Reason), ("place", request.Place) })
             if (text.Length > LongestText || PlainText.Of(text) != text.Normalize(NormalizationForm.FormC))
                 throw new SigningRefusedException(SigningRefusal.TextNotWritable, string.Create(CultureInfo.InvariantCulture, $"The signature's {name} is longer than {LongestText} characters, is not in composed form (NFC), or holds control or invisible characters."));
-        if (request.SignerName.Length == 0) throw new SigningRefusedException(SigningRefusal.TextNotWritable, "The signer's name is empty.");
+        if (request.SignerName.Length == 0)
+            throw new SigningRefusedException(SigningRefusal.TextNotWritable, "The signer's name is empty.");
     }
 
     private static FormField FindField(PdfRevisions file, SignRequest request)
@@ -63,13 +66,16 @@ public static class Signer
             throw new SigningRefusedException(SigningRefusal.NoSuchField, fields.Count == 0
                 ? "The file has no prepared signature field: it is not a sheet made by this program."
                 : $"The file has no prepared signature field \"{request.Field}\"; it has {PlainText.List([.. fields.Select(known => PlainText.Of(known.Name))])}.");
-        if (named[0].IsFilled(view)) throw new SigningRefusedException(SigningRefusal.FieldAlreadySigned, $"The field {request.Field} is signed already.");
+        if (named[0].IsFilled(view))
+            throw new SigningRefusedException(SigningRefusal.FieldAlreadySigned, $"The field {request.Field} is signed already.");
         var filled = fields.Where(known => known.IsFilled(view)).ToList();
-        if (request.Certify && filled.Count > 0) throw new SigningRefusedException(SigningRefusal.CertificationNotFirst, "The file is signed already; only the first signature can certify it.");
+        if (request.Certify && filled.Count > 0)
+            throw new SigningRefusedException(SigningRefusal.CertificationNotFirst, "The file is signed already; only the first signature can certify it.");
         foreach (var other in filled)
         {
             var (_, value, why) = SignatureCheck.Value(file, view, other);
-            if (value is null) throw new SigningRefusedException(SigningRefusal.NotReadable, $"The signature in the field {PlainText.Of(other.Name)} is not whole: {why}. Do not sign this file.");
+            if (value is null)
+                throw new SigningRefusedException(SigningRefusal.NotReadable, $"The signature in the field {PlainText.Of(other.Name)} is not whole: {why}. Do not sign this file.");
             if (CertificateRules.SameKey(value.Certificate, request.Certificate))
                 throw new SigningRefusedException(SigningRefusal.KeyUsedInOtherField, $"The field {PlainText.Of(other.Name)} is signed with the same key; designer and checker must be two persons with two keys.");
         }

@@ -112,5 +112,6 @@ internal sealed class UpdateWriter : INewObjects
         return packed.ToArray();
     }
 
-    private static void Write(MemoryStream output, FormattableString text) => output.Write(Encoding.Latin1.GetBytes(text.ToString(CultureInfo.InvariantCulture)));
+    private static void Write(MemoryStream output, FormattableString text) =>
+        output.Write(Encoding.Latin1.GetBytes(text.ToString(CultureInfo.InvariantCulture)));
 }

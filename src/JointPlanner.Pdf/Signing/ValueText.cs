@@ -14,11 +14,13 @@ internal static class ValueText
         return text.ToString();
     }
 
-    public static PdfText Text(string text) => Bytes(text.All(c => c is >= ' ' and <= '~') ? Encoding.ASCII.GetBytes(text) : [0xFE, 0xFF, .. Encoding.BigEndianUnicode.GetBytes(text)]);
+    public static PdfText Text(string text) =>
+        Bytes(text.All(c => c is >= ' ' and <= '~') ? Encoding.ASCII.GetBytes(text) : [0xFE, 0xFF, .. Encoding.BigEndianUnicode.GetBytes(text)]);
 
     public static PdfText Bytes(byte[] bytes) => new(bytes, true, 0, 0);
 
-    public static PdfText Date(DateTimeOffset instant) => Text(instant.UtcDateTime.ToString("'D:'yyyyMMddHHmmss'+00''00'''", CultureInfo.InvariantCulture));
+    public static PdfText Date(DateTimeOffset instant) =>
+        Text(instant.UtcDateTime.ToString("'D:'yyyyMMddHHmmss'+00''00'''", CultureInfo.InvariantCulture));
 
     public static PdfNumber Number(double value) => new(value, Math.Truncate(value) == value);
 
@@ -50,7 +52,8 @@ internal static class ValueText
     }
 
     // PDF knows no exponents. Sixteen digits behind the point give back any number of a sheet as it was read.
-    private static string Digits(double value) => Math.Abs(value) < 1e12 ? ((decimal)value).ToString("0.################", CultureInfo.InvariantCulture) : value.ToString("F0", CultureInfo.InvariantCulture);
+    private static string Digits(double value) =>
+        Math.Abs(value) < 1e12 ? ((decimal)value).ToString("0.################", CultureInfo.InvariantCulture) : value.ToString("F0", CultureInfo.InvariantCulture);
 
     private static void Name(StringBuilder text, string name)
     {

@@ -43,5 +43,6 @@ public enum FileChangeKind
 public sealed record FileChange(FileChangeKind Kind, string Text)
 {
     /// <summary>A later update may do this without touching what was signed before.</summary>
-    public bool IsAllowed => Kind is FileChangeKind.FieldSigned or FileChangeKind.SignatureFlags or FileChangeKind.Certified or FileChangeKind.SecurityStore;
+    public bool IsAllowed =>
+        Kind is FileChangeKind.FieldSigned or FileChangeKind.SignatureFlags or FileChangeKind.Certified or FileChangeKind.SecurityStore;
 }

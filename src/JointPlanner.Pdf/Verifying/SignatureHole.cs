@@ -27,15 +27,19 @@ internal sealed record SignatureHole(int Start, int End, int Covered, int Revisi
             return (null, "the signed range is not four numbers");
         if (dictionary["Contents"] is not PdfText { IsHex: true } text) return (null, "the signature holds no value");
         if (zero != 0) return (null, "the signed range does not begin at the file's first byte");
-        if (start != text.Start || end != text.End || text.Start < found.Start) return (null, "the signed range leaves out more or less than the signature's own value");
+        if (start != text.Start || end != text.End || text.Start < found.Start)
+            return (null, "the signed range leaves out more or less than the signature's own value");
         long covered = (long)end + rest;
         int revision = -1;
         for (int i = 0; i < file.All.Count; i++) if (file.All[i].End == covered || file.All[i].MarkEnd == covered) revision = i;
-        if (revision < 0) return (null, string.Create(CultureInfo.InvariantCulture, $"the signed range ends at byte {covered}, where no state of the file ends"));
-        if (!file.All[revision].Entries.ContainsKey(reference.Number)) return (null, "the signature stands outside the update that it signs");
+        if (revision < 0)
+            return (null, string.Create(CultureInfo.InvariantCulture, $"the signed range ends at byte {covered}, where no state of the file ends"));
+        if (!file.All[revision].Entries.ContainsKey(reference.Number))
+            return (null, "the signature stands outside the update that it signs");
         if (text.Bytes.Length > LargestValue) return (null, "the signature's value is larger than any signature");
         var digits = file.File.AsSpan(start + 1, end - start - 2);
-        if (digits.ContainsAnyExcept(UpperCaseDigits) && digits.ContainsAnyExcept(LowerCaseDigits)) return (null, "the signature's value is not written in plain hexadecimal");
+        if (digits.ContainsAnyExcept(UpperCaseDigits) && digits.ContainsAnyExcept(LowerCaseDigits))
+            return (null, "the signature's value is not written in plain hexadecimal");
         return (new SignatureHole(start, end, (int)covered, revision, text.Bytes, dictionary), "");
     }
 

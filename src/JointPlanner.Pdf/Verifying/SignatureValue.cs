@@ -35,7 +35,8 @@ internal sealed record SignatureValue(X509Certificate2 Certificate, X509Certific
     {
         AsnDecoder.ReadEncodedValue(padded, AsnEncodingRules.BER, out _, out _, out int used);
         if (padded.AsSpan(used).ContainsAnyExcept((byte)0)) return (null, "bytes are hidden behind the signature's value");
-        if (!SignatureEncoding.IsPlain(padded.AsMemory(0, used))) return (null, "the signature's value is not laid out as the standard wants it");
+        if (!SignatureEncoding.IsPlain(padded.AsMemory(0, used)))
+            return (null, "the signature's value is not laid out as the standard wants it");
         var cms = new SignedCms(new ContentInfo(signed), detached: true);
         cms.Decode(padded.AsSpan(0, used));
         if (!cms.Detached) return (null, "the signature carries a content of its own instead of signing the file");
@@ -43,11 +44,13 @@ internal sealed record SignatureValue(X509Certificate2 Certificate, X509Certific
         if (cms.Certificates.Count > MostCertificates) return (null, "the signature carries more certificates than any chain needs");
         if (cms.SignerInfos is not { Count: 1 } signers) return (null, "the signature's value is not by exactly one signer");
         var signer = signers[0];
-        if (!Digests.Contains(signer.DigestAlgorithm.Value)) return (null, "the signature uses a digest that is no longer safe or is not known here");
+        if (!Digests.Contains(signer.DigestAlgorithm.Value))
+            return (null, "the signature uses a digest that is no longer safe or is not known here");
         if (signer.Certificate is not { } certificate) return (null, "the signer's certificate is missing");
         if (CertificateRules.WeakKey(certificate) is { } weak) return (null, weak);
         cms.CheckSignature(verifySignatureOnly: true);
-        if (Named(signer, certificate) is var named && named == CertificateNaming.Another) return (null, "the signature was made with another certificate than the one it carries");
+        if (Named(signer, certificate) is var named && named == CertificateNaming.Another)
+            return (null, "the signature was made with another certificate than the one it carries");
         if (named == CertificateNaming.None && mustNameCertificate) return (null, "the signature does not name its certificate");
         return (new SignatureValue(certificate, cms.Certificates, signer, Unprotected(cms, signer, named)), "");
     }

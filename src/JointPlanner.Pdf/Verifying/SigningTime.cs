@@ -27,7 +27,8 @@ internal static class SigningTime
     {
         try
         {
-            if (attribute.Values.Count != 1 || !Rfc3161TimestampToken.TryDecode(attribute.Values[0].RawData, out var token, out _)) return null;
+            if (attribute.Values.Count != 1 || !Rfc3161TimestampToken.TryDecode(attribute.Values[0].RawData, out var token, out _))
+                return null;
             if (!token.VerifySignatureForSignerInfo(signer, out var server) || server is null) return null;
             var instant = token.TokenInfo.Timestamp.ToUniversalTime();
             var chain = IssuerChain.Of(server, token.AsSignedCms().Certificates, roots, instant);
@@ -44,11 +45,13 @@ internal static class SigningTime
     internal static DateTimeOffset? Parse(string? text)
     {
         if (text is null || text.Length is < 16 or > 23 || !text.StartsWith("D:", StringComparison.Ordinal)) return null;
-        if (!DateTime.TryParseExact(text.AsSpan(2, 14), "yyyyMMddHHmmss", CultureInfo.InvariantCulture, DateTimeStyles.None, out var local)) return null;
+        if (!DateTime.TryParseExact(text.AsSpan(2, 14), "yyyyMMddHHmmss", CultureInfo.InvariantCulture, DateTimeStyles.None, out var local))
+            return null;
         string zone = text[16..].TrimEnd('\'').Replace("'", "", StringComparison.Ordinal);
         if (zone is "" or "Z" or "Z00" or "Z0000") zone = "+0000";
         if (zone.Length == 3) zone += "00";
-        if (zone.Length != 5 || zone[0] is not ('+' or '-') || !int.TryParse(zone.AsSpan(1), NumberStyles.None, CultureInfo.InvariantCulture, out int digits)) return null;
+        if (zone.Length != 5 || zone[0] is not ('+' or '-') || !int.TryParse(zone.AsSpan(1), NumberStyles.None, CultureInfo.InvariantCulture, out int digits))
+            return null;
         int minutes = digits / 100 * 60 + digits % 100;
         if (digits % 100 > 59 || minutes > 14 * 60 || local.Year is < 1900 or > 9000) return null;
         return new DateTimeOffset(local, TimeSpan.FromMinutes(zone[0] == '-' ? -minutes : minutes)).ToUniversalTime();

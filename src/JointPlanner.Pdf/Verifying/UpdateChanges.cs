@@ -112,7 +112,8 @@ internal sealed class UpdateChanges
 
     private bool IsSignatureOfThisUpdate(PdfValue? value)
     {
-        if (value is not PdfReference reference || !_added.Contains(reference.Number) || _after.Dictionary(reference) is not { } signature) return false;
+        if (value is not PdfReference reference || !_added.Contains(reference.Number) || _after.Dictionary(reference) is not { } signature)
+            return false;
         var range = _after.Array(signature["ByteRange"])?.Items.Select(_after.Whole).ToList();
         var update = _file.All[_revision];
         return signature["Contents"] is PdfText && range is [_, _, { } start, { } length] && (long)start + length is var end && (end == update.End || end == update.MarkEnd);
@@ -234,5 +235,6 @@ internal sealed class UpdateChanges
         }
     }
 
-    private bool IsContainer(PdfIndirect found) => found.Value is PdfStream stream && (found.Start == _file.All[_revision].CrossReferenceStart || _after.Name(stream.Dictionary["Type"]) == "ObjStm");
+    private bool IsContainer(PdfIndirect found) =>
+        found.Value is PdfStream stream && (found.Start == _file.All[_revision].CrossReferenceStart || _after.Name(stream.Dictionary["Type"]) == "ObjStm");
 }

@@ -98,12 +98,14 @@ public static class UpdateRule
             return No(UploadRefusal.ChangedBytes, "The archived file is not a whole state of the uploaded one.");
         int updates = file.All.Count - 1 - first;
         if (updates == 0) return No(UploadRefusal.NothingAdded, "The upload adds no update to the archived file: nothing was signed.");
-        if (updates > 1) return No(UploadRefusal.SecondUpdate, Invariant($"The upload adds {updates} updates to the archived file; one signature is one update. Sign the downloaded file once and change nothing else."));
+        if (updates > 1)
+            return No(UploadRefusal.SecondUpdate, Invariant($"The upload adds {updates} updates to the archived file; one signature is one update. Sign the downloaded file once and change nothing else."));
         var view = file.Last;
         var changes = UpdateChanges.Of(file, file.All.Count - 1);
         // Stricter than for readers: a store of certificates may follow later, but is no part of signing.
         var other = changes.Where(change => !change.IsAllowed || change.Kind == FileChangeKind.SecurityStore).Select(change => change.Text).ToList();
-        if (other.Count > 0) return No(UploadRefusal.MoreThanASignature, $"The upload changes more than the signature field: {PlainText.List(other)}.");
+        if (other.Count > 0)
+            return No(UploadRefusal.MoreThanASignature, $"The upload changes more than the signature field: {PlainText.List(other)}.");
         var before = FormFields.In(file.View(first)).Where(known => known.IsFilled(file.View(first))).Select(known => known.Number).ToHashSet();
         var signed = FormFields.In(view).Where(known => known.IsFilled(view) && !before.Contains(known.Number)).ToList();
         if (signed.Count == 0) return No(UploadRefusal.NothingAdded, "The upload fills no signature field: nothing was signed.");
@@ -120,7 +122,8 @@ public static class UpdateRule
         string fingerprint = CertificateRules.Fingerprint(value.Certificate);
         if (!CryptographicOperations.FixedTimeEquals(System.Text.Encoding.ASCII.GetBytes(fingerprint), System.Text.Encoding.ASCII.GetBytes(registered.ToUpperInvariant())))
             return No(UploadRefusal.AnotherCertificate, $"The sheet was signed with the certificate {fingerprint} of {PlainText.Of(value.Certificate.Subject)}; registered for this person is {PlainText.Of(registered)}.");
-        if (CertificateRules.Fault(value.Certificate, received) is { } unsuitable) return No(UploadRefusal.CertificateUnsuitable, unsuitable.Text);
+        if (CertificateRules.Fault(value.Certificate, received) is { } unsuitable)
+            return No(UploadRefusal.CertificateUnsuitable, unsuitable.Text);
         foreach (var filled in FormFields.In(view).Where(known => known.Number != field.Number && known.IsFilled(view)))
             if (SignatureCheck.Value(file, view, filled).Value is { } earlier && CertificateRules.SameKey(earlier.Certificate, value.Certificate))
                 return No(UploadRefusal.KeyUsedInOtherField, $"The field {PlainText.Of(filled.Name)} is signed with the same key; designer and checker must be two persons with two keys.");

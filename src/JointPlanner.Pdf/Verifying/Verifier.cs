@@ -41,7 +41,8 @@ public sealed class Verifier(X509Certificate2Collection trustedRoots, PdfReadLim
             var fields = FormFields.In(view);
             var (origin, text) = Origin(view, fields);
             var filled = fields.Where(field => field.IsFilled(view)).ToList();
-            if (filled.Count > MostSignatures) throw new PdfReadException(PdfReadFailure.TooManyObjects, "The PDF has more than 16 signatures.");
+            if (filled.Count > MostSignatures)
+                throw new PdfReadException(PdfReadFailure.TooManyObjects, "The PDF has more than 16 signatures.");
             var updates = Enumerable.Range(0, file.All.Count).Select(i => new Lazy<List<FileChange>>(() => UpdateChanges.Of(file, i))).ToList();
             var reports = filled.Select(field => SignatureCheck.Of(file, view, field, updates, trustedRoots)).OrderBy(report => report.Unchanged.CoveredBytes).ToList();
             return new(origin, text, pdf.Length, hash, reports, [.. fields.Where(field => !field.IsFilled(view)).Select(field => PlainText.Of(field.Name))], archive, CheckedAlways);

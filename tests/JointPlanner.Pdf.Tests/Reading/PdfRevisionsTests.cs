@@ -183,7 +183,8 @@ public class PdfRevisionsTests
         Assert.Contains("bytes of strings", failure.Message, StringComparison.Ordinal);
     }
 
-    private static PdfDictionary Catalog(string value) => PdfRevisions.Open(HandMadeUpdate.Append(HandMadeSheet.WithTable(), (1, $"<</Type/Catalog/X {value}>>"))).Last.Catalog;
+    private static PdfDictionary Catalog(string value) =>
+        PdfRevisions.Open(HandMadeUpdate.Append(HandMadeSheet.WithTable(), (1, $"<</Type/Catalog/X {value}>>"))).Last.Catalog;
 
     private static byte[] WithAttachment(byte[] content)
     {
@@ -200,5 +201,6 @@ public class PdfRevisionsTests
 
     private static byte[] File(string rest) => Encoding.Latin1.GetBytes("%PDF-1.7\n" + rest);
 
-    private static void Refused(PdfReadFailure expected, byte[] file) => Assert.Equal(expected, Assert.Throws<PdfReadException>(() => PdfRevisions.Open(file)).Failure);
+    private static void Refused(PdfReadFailure expected, byte[] file) =>
+        Assert.Equal(expected, Assert.Throws<PdfReadException>(() => PdfRevisions.Open(file)).Failure);
 }

@@ -24,7 +24,8 @@ internal sealed class OldFashionedIssuer(RSA key) : X509SignatureGenerator
         return writer.Encode();
     }
 
-    public override byte[] SignData(byte[] data, HashAlgorithmName hashAlgorithm) => key.SignData(data, HashAlgorithmName.SHA1, RSASignaturePadding.Pkcs1);
+    public override byte[] SignData(byte[] data, HashAlgorithmName hashAlgorithm) =>
+        key.SignData(data, HashAlgorithmName.SHA1, RSASignaturePadding.Pkcs1);
 
     protected override PublicKey BuildPublicKey() => new(key);
 }

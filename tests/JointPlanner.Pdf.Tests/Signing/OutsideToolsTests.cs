@@ -12,7 +12,8 @@ public sealed class OutsideToolsTests : IDisposable
 {
     private readonly OutsideTool _tool = new();
 
-    public static TheoryData<string, bool> Variants => new() { { "stream", false }, { "stream", true }, { "table", false }, { "form in catalog", true } };
+    public static TheoryData<string, bool> Variants =>
+        new() { { "stream", false }, { "stream", true }, { "table", false }, { "form in catalog", true } };
 
     [Theory]
     [MemberData(nameof(Variants))]
@@ -115,5 +116,6 @@ public sealed class OutsideToolsTests : IDisposable
         return _tool.Run("pdfsig", "-nssdir", "sql:nss", "signed.pdf").Output;
     }
 
-    private static byte[] Pem(System.Security.Cryptography.X509Certificates.X509Certificate2 certificate) => System.Text.Encoding.ASCII.GetBytes(string.Create(CultureInfo.InvariantCulture, $"{certificate.ExportCertificatePem()}\n"));
+    private static byte[] Pem(System.Security.Cryptography.X509Certificates.X509Certificate2 certificate) =>
+        System.Text.Encoding.ASCII.GetBytes(string.Create(CultureInfo.InvariantCulture, $"{certificate.ExportCertificatePem()}\n"));
 }

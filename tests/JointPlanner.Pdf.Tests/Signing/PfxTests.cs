@@ -37,7 +37,8 @@ public class PfxTests
     }
 
     [Fact]
-    public void A_file_over_32_KiB_is_not_opened() => Assert.Equal(PfxFailure.TooLarge, Pfx.Load(new byte[(32 * 1024) + 1], Password).Failure);
+    public void A_file_over_32_KiB_is_not_opened() =>
+        Assert.Equal(PfxFailure.TooLarge, Pfx.Load(new byte[(32 * 1024) + 1], Password).Failure);
 
     [Fact]
     public void A_file_without_a_private_key_is_told()

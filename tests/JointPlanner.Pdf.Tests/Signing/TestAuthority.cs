@@ -38,7 +38,8 @@ internal sealed class TestAuthority
 
     public X509Certificate2Collection Roots => [X509CertificateLoader.LoadCertificate(Root.RawData)];
 
-    public X509Certificate2Collection Chain => [X509CertificateLoader.LoadCertificate(Intermediate.RawData), X509CertificateLoader.LoadCertificate(Root.RawData)];
+    public X509Certificate2Collection Chain =>
+        [X509CertificateLoader.LoadCertificate(Intermediate.RawData), X509CertificateLoader.LoadCertificate(Root.RawData)];
 
     public X509Certificate2 Rsa(string subject, int bits)
     {

@@ -96,7 +96,8 @@ public class UpdateRuleTests
     }
 
     [Fact]
-    public void Bytes_behind_the_archived_file_that_are_no_update_are_refused() => Refused(UploadRefusal.NotReadable, [.. Archived, .. "more"u8]);
+    public void Bytes_behind_the_archived_file_that_are_no_update_are_refused() =>
+        Refused(UploadRefusal.NotReadable, [.. Archived, .. "more"u8]);
 
     [Fact]
     public async Task A_damaged_signature_is_refused()
@@ -130,7 +131,8 @@ public class UpdateRuleTests
         Assert.Equal(UploadRefusal.KeyUsedInOtherField, answer.Refusal);
     }
 
-    private static UploadAnswer Judge(byte[] uploaded) => UpdateRule.AcceptSignedUpload(Archived, uploaded, "designer", Registered, TestAuthority.SigningTime);
+    private static UploadAnswer Judge(byte[] uploaded) =>
+        UpdateRule.AcceptSignedUpload(Archived, uploaded, "designer", Registered, TestAuthority.SigningTime);
 
     private static UploadAnswer Refused(UploadRefusal expected, byte[] uploaded)
     {
