@@ -1,0 +1,106 @@
+using JointPlanner.Engine;
+using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Climates;
+using JointPlanner.Engine.Formulas;
+using JointPlanner.Exchange.Documents;
+using JointPlanner.Exchange.Printing;
+
+namespace JointPlanner.Cli.Compute;
+
+/// <summary>A computed plan as text for people, in the order in which an engineer reads it.</summary>
+/// <param name="result">What was computed.</param>
+/// <param name="basis">The code edition.</param>
+/// <param name="rules">The owner's rules; null for none.</param>
+/// <param name="defaults">Defaults that stand in where nobody gave a value.</param>
+/// <param name="profile">Units and digits.</param>
+internal sealed class ResultText(
+    Result result, CodeBasis basis, OwnerRuleSet? rules, IReadOnlyList<DefaultUsed> defaults, DisplayProfile profile)
+{
+    /// <summary>All lines.</summary>
+    public IEnumerable<string> Lines()
+    {
+        var joints = new JointText(profile);
+        return Head()
+            .Concat(Section("Defaults used, because nobody gave a value", defaults.Select(d => $"  {d.Path} = {d.Text}: {d.Reason}")))
+            .Concat(Section("Deck segments", Segments()))
+            .Concat(result.Joints.SelectMany(j => Section(JointText.Title(j), joints.Lines(j))))
+            .Concat(Section("Bearing travel from setting, up-station positive, without factors", Bearings()))
+            .Concat(Section("Force of holding lines on the deck, up-station positive", Restraints()))
+            .Concat(Section("Solved lengths and their checks by hand", HandChecks()))
+            .Concat(Section("Findings", Findings()))
+            .Concat(Section("Values from memory: check each against the licensed text; an owner confirms them by name before anything is issued",
+                result.MemoryValues.Select(v => $"  {v.ValueId}: {ProvenanceText.Of(v)}")))
+            .Concat(Section("Caution", Caution));
+    }
+
+    private IEnumerable<string> Head()
+    {
+        var (plan, structure) = (result.Plan, result.Plan.Structure);
+        yield return $"{structure.Name} ({structure.Number}), {structure.Place}";
+        var named = plan.Basis.Profile.Length > 0 ? $", parameters {plan.Basis.Profile}" : "";
+        yield return $"Basis: {basis.Title}{named} ({basis.Id}, revision {basis.Revision})";
+        yield return rules is null ? "Owner's rules: none; nothing is fitted." : $"Owner's rules: {rules.Name}, version {rules.Version} ({rules.Id})";
+        yield return $"Before the day: {Words.Of(DeckTemperatures.DoubtOf(plan, basis))}; {Words.Of(DeckTemperatures.SafetyOf(plan, basis))}.";
+        yield return $"Shown in {profile.Name}.";
+    }
+
+    private IEnumerable<string> Segments()
+    {
+        if (result.Segments.IsEmpty) return [];
+        var table = new TextTable("segment", "deck", "#from", "#to", "#lowest", "#highest", "#doubt", "#expansion", "#stands still at");
+        foreach (var s in result.Segments)
+            table.Add(
+                Named(s.Segment.Id, s.Segment.Mark), Words.Of(s.Segment.Kind), Say(s.Segment.Start, Quantity.Length), Say(s.Segment.End, Quantity.Length),
+                Say(s.Temperature.Min, Quantity.Temperature), Say(s.Temperature.Max, Quantity.Temperature),
+                Say(s.Temperature.DoubtAllowance, Quantity.TemperatureDifference), Say(s.Temperature.Expansion, Quantity.Expansion),
+                s.ZeroMovementPoint is { } zero ? Say(zero, Quantity.Length) : "nowhere");
+        return table.Lines("  ");
+    }
+
+    private IEnumerable<string> Bearings()
+    {
+        if (result.Bearings.IsEmpty) return [];
+        var table = new TextTable("line", "kind", "#hot, at start", "#cold, at start", "#hot, at end", "#cold, at end");
+        foreach (var b in result.Bearings)
+        {
+            var line = result.Plan.Bearings.First(l => l.Id == b.Bearing);
+            table.Add(
+                Named(line.Id, line.Mark), Words.Of(line.Kind), Say(b.HotAtStart, Quantity.Movement), Say(b.ColdAtStart, Quantity.Movement),
+                Say(b.HotAtEnd, Quantity.Movement), Say(b.ColdAtEnd, Quantity.Movement));
+        }
+        return table.Lines("  ");
+    }
+
+    private IEnumerable<string> Restraints()
+    {
+        if (result.Restraints.IsEmpty) return [];
+        var table = new TextTable("line", "#hot", "#cold, all shortening over");
+        foreach (var r in result.Restraints) table.Add(r.Bearing, Say(r.Hot, Quantity.Force), Say(r.Cold, Quantity.Force));
+        return table.Lines("  ");
+    }
+
+    private IEnumerable<string> HandChecks() => result.HandChecks.Select(c => c.ByHand is { } hand
+        ? $"  {c.What}: solved {Say(c.Solved, Quantity.Length)}, by hand {Say(hand, Quantity.Length)}, {(c.Agrees ? "within" : "NOT within")} {Say(c.Band, Quantity.Length)}"
+        : $"  {c.What}: solved {Say(c.Solved, Quantity.Length)}, no check by hand: {c.Reason}");
+
+    private IEnumerable<string> Findings() => result.Findings.OrderByDescending(f => f.Severity)
+        .Select(f => $"  {FindingText.Of(f.Severity)}{(f.Path.Length > 0 ? $" ({f.Path})" : "")}: {FindingText.Of(f, profile)}");
+
+    private static readonly string[] Caution =
+    [
+        "  This tool assists a licensed engineer. The engineer of record, local codes and licensed practice decide.",
+        "  On the day: traffic control, work at height, pinch points while the deck moves. Never loosen restraints of a loaded bearing from these numbers alone.",
+    ];
+
+    private static IEnumerable<string> Section(string heading, IEnumerable<string> lines)
+    {
+        var all = lines.ToArray();
+        return all.Length == 0 ? [] : ["", heading, .. all];
+    }
+
+    private static string Named(string id, string mark) => mark.Length > 0 && mark != id ? $"{id} ({mark})" : id;
+
+    private string Say(Number number, Quantity quantity) => Say(number.Value, quantity);
+
+    private string Say(double value, Quantity quantity) => NumberText.WithUnit(value, quantity, profile);
+}
