@@ -61,10 +61,13 @@ internal static class ComputeCommand
 
     private static Result? Compute(PlanFile read) => read.IsFaulty || read.Reading?.Plan is not { } plan
         ? null
-        : Movements.Of(plan, Catalogue.Find(plan.Basis.Code)!, read.Rules);
+        : Movements.Of(plan, Catalogue.Find(plan.Basis.Code)!, read.Rules is { } rules ? new Owner(rules, Own(read).SettingStep) : null);
 
     private static int ExitOf(Result result) => result.CanBeIssued ? ExitCodes.Done : ExitCodes.CannotBeIssued;
 
     private static DisplayProfile ProfileOf(PlanFile read, string? asked) =>
-        DisplayProfile.Of(asked ?? (read.Reading?.Document?.TextAt("display") is "us" ? "us" : "metric"));
+        asked is null ? Own(read) : DisplayProfile.Of(asked);
+
+    /// <summary>The plan's own profile: it decides how set values are rounded, whatever units are shown.</summary>
+    private static DisplayProfile Own(PlanFile read) => read.Reading?.Document?.TextAt("display") is "us" ? DisplayProfile.Us : DisplayProfile.Metric;
 }

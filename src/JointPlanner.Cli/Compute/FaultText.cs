@@ -15,8 +15,12 @@ internal static class FaultText
             yield return $"{(fault.IsWarning ? "warning" : "fault")} in {file}, field {(fault.Path.Length > 0 ? fault.Path : "(the whole file)")}";
             if (fault.Value.Length > 0) yield return $"  value:   {fault.Value}";
             yield return $"  wrong:   {fault.Wrong}";
-            yield return $"  allowed: {fault.Allowed}";
+            yield return $"  allowed: {Bare(fault.Allowed)}";
             yield return $"  do:      {fault.Remedy}";
         }
     }
+
+    /// <summary>Sentences of the readers begin with the word that stands before them here.</summary>
+    private static string Bare(string allowed) =>
+        allowed.StartsWith("Allowed: ", StringComparison.Ordinal) ? allowed["Allowed: ".Length..] : allowed;
 }

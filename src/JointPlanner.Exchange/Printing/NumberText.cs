@@ -62,7 +62,7 @@ public static class NumberText
         // The exponent after rounding: 9.9996 to four digits is 10.00.
         var scientific = shown.ToString("E" + (count - 1).ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
         var power = int.Parse(scientific.AsSpan(scientific.IndexOf('E', StringComparison.Ordinal) + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture);
-        return power is < -4 or > 8
+        return power is < -4 or > 6
             ? (shown / Math.Pow(10, power), exponent + power, count - 1)
             : (shown, exponent, Math.Max(0, count - 1 - power));
     }

@@ -29,10 +29,12 @@ public static class PrintedUnits
         ["mm/kN"] = (1e-6, Length - Force), ["in/kip"] = (In / Kip, Length - Force),
     };
 
+    private static readonly KeyValuePair<string, (double Factor, Powers Powers)>[] LongestFirst = [.. Known.OrderByDescending(k => k.Key.Length)];
+
     /// <summary>The longest unit that stands at this place and ends there; null for none.</summary>
     public static (string Name, double Factor, Powers Powers)? At(string text, int place)
     {
-        foreach (var (name, unit) in Known.OrderByDescending(k => k.Key.Length))
+        foreach (var (name, unit) in LongestFirst)
             if (string.CompareOrdinal(text, place, name, 0, name.Length) == 0 && EndsAt(text, place + name.Length))
                 return (name, unit.Factor, unit.Powers);
         return null;
