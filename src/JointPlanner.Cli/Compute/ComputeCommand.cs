@@ -2,7 +2,6 @@ using System.CommandLine;
 using System.Text.Encodings.Web;
 using System.Text.Json;
 using System.Text.Json.Nodes;
-using JointPlanner.Codes;
 using JointPlanner.Engine;
 using JointPlanner.Exchange.Printing;
 
@@ -38,9 +37,8 @@ internal static class ComputeCommand
     {
         foreach (var file in read.Faults.GroupBy(f => f.File))
             foreach (var line in FaultText.Lines(file.Key, file.Select(f => f.Fault))) error.WriteLine(line);
-        if (Compute(read) is not { } result) return ExitCodes.FaultyInput;
-        var basis = Catalogue.Find(result.Plan.Basis.Code)!;
-        foreach (var line in new ResultText(result, basis, read.Rules, read.Reading!.Defaults, profile).Lines()) output.WriteLine(line);
+        if (read.IsFaulty || read.Calculation is not { Result: { } result } calculation) return ExitCodes.FaultyInput;
+        foreach (var line in new ResultText(calculation, profile).Lines()) output.WriteLine(line);
         if (withSteps)
         {
             output.WriteLine();
@@ -52,22 +50,15 @@ internal static class ComputeCommand
 
     private static int ForMachines(PlanFile read, DisplayProfile profile, TextWriter output)
     {
-        var result = Compute(read);
-        var document = result is null ? [] : ResultJson.Of(result, Catalogue.Find(result.Plan.Basis.Code)!, read.Rules, profile);
+        var result = read.IsFaulty ? null : read.Calculation?.Result;
+        var document = result is null ? [] : ResultJson.Of(read.Calculation!, profile);
         document["faults"] = FaultJson.Of(read.Faults);
         output.WriteLine(document.ToJsonString(Readable));
         return result is null ? ExitCodes.FaultyInput : ExitOf(result);
     }
 
-    private static Result? Compute(PlanFile read) => read.IsFaulty || read.Reading?.Plan is not { } plan
-        ? null
-        : Movements.Of(plan, Catalogue.Find(plan.Basis.Code)!, read.Rules is { } rules ? new Owner(rules, Own(read).SettingStep) : null);
-
     private static int ExitOf(Result result) => result.CanBeIssued ? ExitCodes.Done : ExitCodes.CannotBeIssued;
 
     private static DisplayProfile ProfileOf(PlanFile read, string? asked) =>
-        asked is null ? Own(read) : DisplayProfile.Of(asked);
-
-    /// <summary>The plan's own profile: it decides how set values are rounded, whatever units are shown.</summary>
-    private static DisplayProfile Own(PlanFile read) => read.Reading?.Document?.TextAt("display") is "us" ? DisplayProfile.Us : DisplayProfile.Metric;
+        asked is null ? read.Calculation?.Profile ?? DisplayProfile.Metric : DisplayProfile.Of(asked);
 }

@@ -1,13 +1,18 @@
 using JointPlanner.Engine;
+using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Fitting.Counting;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Exchange.Printing;
 
 namespace JointPlanner.Cli.Compute;
 
 /// <summary>One joint as text: what moves it, what counts, what fits, how it is set.</summary>
+/// <param name="result">The whole result.</param>
 /// <param name="profile">Units and digits.</param>
-internal sealed class JointText(DisplayProfile profile)
+internal sealed class JointText(Result result, DisplayProfile profile)
 {
+    private readonly IReadOnlyDictionary<string, Step> byKey = result.ByKey();
+
     /// <summary>Heading of a joint.</summary>
     public static string Title(JointResult joint) =>
         $"Joint {joint.Joint.Id}{(joint.Joint.Mark.Length > 0 ? $" ({joint.Joint.Mark})" : "")}, between {joint.Joint.Near} and {joint.Joint.Far}";
@@ -40,14 +45,19 @@ internal sealed class JointText(DisplayProfile profile)
     {
         var movements = (joint.Fit?.Chosen ?? joint.Fit?.Families.SelectMany(f => f.Sizes).FirstOrDefault())?.Movements ?? [];
         var table = new TextTable("judged by", "#opens by", "#closes by", "factors");
-        foreach (var m in movements)
+        // Racking runs along the joint line; its own line follows.
+        foreach (var m in movements.Where(m => m.Column != Column.Racking))
             table.Add(
                 Words.Of(m.Column), Say(m.OpensBy.Value, Quantity.Movement), Say(m.ClosesBy.Value, Quantity.Movement),
                 string.Join("; ", m.Parts
                     .DistinctBy(p => p.Cause)
                     .Select(p => $"{Words.Of(p.Cause)} {NumberText.Of(p.Factor.Value, Quantity.Ratio, profile)}")
                     .Concat(m.LeftOut.Select(l => $"{Words.Of(l.Cause)} {(l.IsSilent ? "basis silent" : "not counted")}").Distinct())));
-        return table.IsEmpty ? [] : ["  Movements that count when sizing, normal to the joint", .. table.Lines("    ")];
+        if (table.IsEmpty) return [];
+        string[] racking = byKey.TryGetValue(Keys.Racking(joint.Joint.Id, Occasion.Sizing), out var step)
+            ? [$"  Racking that counts when sizing, along the joint: {Say(step.Value, Quantity.Movement)}"]
+            : [];
+        return ["  Movements that count when sizing, normal to the joint", .. table.Lines("    "), .. racking];
     }
 
     private string Say(double value, Quantity quantity) => NumberText.WithUnit(value, quantity, profile);

@@ -1,27 +1,24 @@
 using JointPlanner.Engine;
-using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Formulas;
-using JointPlanner.Exchange.Documents;
 using JointPlanner.Exchange.Printing;
+using JointPlanner.Issuing;
 
 namespace JointPlanner.Cli.Compute;
 
 /// <summary>A computed plan as text for people, in the order in which an engineer reads it.</summary>
-/// <param name="result">What was computed.</param>
-/// <param name="basis">The code edition.</param>
-/// <param name="rules">The owner's rules; null for none.</param>
-/// <param name="defaults">Defaults that stand in where nobody gave a value.</param>
+/// <param name="calculation">A calculation that has a result.</param>
 /// <param name="profile">Units and digits.</param>
-internal sealed class ResultText(
-    Result result, CodeBasis basis, OwnerRuleSet? rules, IReadOnlyList<DefaultUsed> defaults, DisplayProfile profile)
+internal sealed class ResultText(Calculation calculation, DisplayProfile profile)
 {
+    private readonly Result result = calculation.Result!;
+
     /// <summary>All lines.</summary>
     public IEnumerable<string> Lines()
     {
-        var joints = new JointText(profile);
+        var joints = new JointText(result, profile);
         return Head()
-            .Concat(Section("Defaults used, because nobody gave a value", defaults.Select(d => $"  {d.Path} = {d.Text}: {d.Reason}")))
+            .Concat(Section("Defaults used, because nobody gave a value", calculation.Reading.Defaults.Select(d => $"  {d.Path} = {d.Text}: {d.Reason}")))
             .Concat(Section("Deck segments", Segments()))
             .Concat(result.Joints.SelectMany(j => Section(JointText.Title(j), joints.Lines(j))))
             .Concat(Section("Bearing travel from setting, up-station positive, without factors", Bearings()))
@@ -35,11 +32,11 @@ internal sealed class ResultText(
 
     private IEnumerable<string> Head()
     {
-        var (plan, structure) = (result.Plan, result.Plan.Structure);
+        var (plan, structure, basis) = (result.Plan, result.Plan.Structure, calculation.Basis!);
         yield return $"{structure.Name} ({structure.Number}), {structure.Place}";
         var named = plan.Basis.Profile.Length > 0 ? $", parameters {plan.Basis.Profile}" : "";
         yield return $"Basis: {basis.Title}{named} ({basis.Id}, revision {basis.Revision})";
-        yield return rules is null ? "Owner's rules: none; nothing is fitted." : $"Owner's rules: {rules.Name}, version {rules.Version} ({rules.Id})";
+        yield return calculation.Owner?.Rules is not { } rules ? "Owner's rules: none; nothing is fitted." : $"Owner's rules: {rules.Name}, version {rules.Version} ({rules.Id})";
         yield return $"Before the day: {Words.Of(DeckTemperatures.DoubtOf(plan, basis))}; {Words.Of(DeckTemperatures.SafetyOf(plan, basis))}.";
         yield return $"Shown in {profile.Name}.";
     }

@@ -32,13 +32,15 @@ internal sealed class SettingText(DisplayProfile profile)
             table.Add(
                 Say(row.Temperature, Quantity.Temperature),
                 row.Set is { } set ? SetValueText.Of(set.Value, profile) + (row.ByGauge ? ", by gauge" : "") : "do not set",
-                Say(row.Minus), Say(row.Plus), Say(row.Window?.Least), Say(row.Window?.Greatest), Say(row.Reserve),
+                Tolerance(row.Minus), Tolerance(row.Plus), Say(row.Window?.Least), Say(row.Window?.Greatest), Say(row.Reserve),
                 row.Window?.LeastBy.Name ?? "", row.Window?.GreatestBy.Name ?? "");
         var refusals = rows.Where(r => r.Refusal is not null)
             .Select(r => $"      {Say(r.Temperature, Quantity.Temperature)}: {FindingText.Of(r.Refusal!, profile)}"
                 + (r.MidWindow is { } middle ? $" The middle of the window is {SetValueText.Of(middle.Value, profile)}." : ""));
         return table.Lines("      ").Concat(refusals);
     }
+
+    private string Tolerance(Number? tolerance) => tolerance is { } value ? SetValueText.Of(value.Value, profile) : "";
 
     private string Say(Number? opening) => opening is { } value ? Say(value.Value, Quantity.Opening) : "";
 

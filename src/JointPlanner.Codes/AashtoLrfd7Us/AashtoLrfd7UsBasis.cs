@@ -76,12 +76,12 @@ public sealed class AashtoLrfd7UsBasis : CodeBasis
         var seen = new Provenance(Mark.Seen, "Missouri DOT Engineering Policy Guide 751.13", "revision of 7 Feb 2014", "restates the limits of W, LRFD 14.5.3.2");
         var limits = new List<Limit>
         {
-            new("gap in the direction of travel at most 4.0 in at the factored extreme",
+            new("greatest gap in the direction of travel at the factored extreme",
                 derivation.Table("W_max", "greatest surface gap along travel", Quantity.Opening, Unit.InchUnit.ToSi(4.0), seen, "single gap"),
                 Bound.Upper, Measure.Along, GapStrength, seen),
         };
         if (near != DeckKind.Concrete || far != DeckKind.Concrete)
-            limits.Add(new("gap in the direction of travel at least 1.0 in at the factored extreme, steel superstructure",
+            limits.Add(new("least gap in the direction of travel at the factored extreme, steel superstructure",
                 derivation.Table("W_min", "least surface gap along travel", Quantity.Opening, Unit.InchUnit.ToSi(1.0), seen, "steel superstructure"),
                 Bound.Lower, Measure.Along, GapStrength, seen));
         return limits;
@@ -93,7 +93,7 @@ public sealed class AashtoLrfd7UsBasis : CodeBasis
         var source = Memory("14.5.3.2", "aashto-lrfd-7-us/modular-gap");
         return
         [
-            new("each gap in the direction of travel at most 3.0 in at the factored extreme",
+            new("greatest gap of each cell in the direction of travel at the factored extreme",
                 derivation.Table("W_max", "greatest gap of one cell along travel", Quantity.Opening, Unit.InchUnit.ToSi(3.0), source, "multiple gaps"),
                 Bound.Upper, Measure.Along, GapStrength, source),
         ];

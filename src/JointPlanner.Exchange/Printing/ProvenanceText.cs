@@ -13,7 +13,8 @@ public static class ProvenanceText
     {
         Mark.Seen => Cited(source),
         Mark.Memory => $"{Cited(source)} ({FromMemory})",
-        Mark.Own => $"our own derivation: {(source.Place.Length > 0 ? source.Place : source.Document)}",
+        Mark.Own when source.Document == Provenance.Derived("").Document => $"our own derivation: {source.Place}",
+        Mark.Own => $"our own proposal, not published: {Cited(source)}",
         Mark.Given => $"given by designer or owner: {Cited(source)}",
         _ => throw new ArgumentOutOfRangeException(nameof(source)),
     };
