@@ -1,5 +1,9 @@
 using System.CommandLine;
+using JointPlanner.Cli.Admin;
 using JointPlanner.Cli.Compute;
+using JointPlanner.Cli.Sheets;
+using JointPlanner.Cli.Signing;
+using JointPlanner.Cli.Verifying;
 
 namespace JointPlanner.Cli;
 
@@ -16,6 +20,10 @@ internal static class CommandLine
         var root = new RootCommand("Movements, joints and setting tables of bridge decks, from plan files. " + ExitCodes.InWords)
         {
             ComputeCommand.Make(),
+            SheetCommand.Make(),
+            SignCommand.Make(),
+            VerifyCommand.Make(),
+            AdminCommand.Make(),
         };
         var parsed = root.Parse(arguments);
         if (parsed.Errors.Count > 0)

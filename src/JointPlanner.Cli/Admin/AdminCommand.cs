@@ -1,0 +1,44 @@
+using System.CommandLine;
+using JointPlanner.Archive;
+using JointPlanner.Archive.PostgreSql;
+using JointPlanner.Archive.Sqlite;
+
+namespace JointPlanner.Cli.Admin;
+
+/// <summary><c>admin migrate</c>: brings the database up to this program with the owning role, and makes guards and grants again.</summary>
+internal static class AdminCommand
+{
+    /// <summary>The command with its parts.</summary>
+    public static Command Make()
+    {
+        var migrate = new Command("migrate",
+            "Migrates the database named by Archive__Kind (sqlite or postgresql), Archive__ConnectionString (PostgreSQL) or Archive__Folder (SQLite), and grants to Archive__AppRole.");
+        migrate.SetAction(async (parsed, cancellation) =>
+        {
+            try
+            {
+                await using var archive = Open();
+                await archive.Migrate(null, cancellation);
+                await parsed.InvocationConfiguration.Output.WriteLineAsync("The database is at this program's schema; guards and grants were made again.");
+                return ExitCodes.Done;
+            }
+            catch (ArchiveNotReady refused)
+            {
+                await parsed.InvocationConfiguration.Error.WriteLineAsync(refused.Message);
+                return ExitCodes.FaultyInput;
+            }
+        });
+        return new Command("admin", "Administration of the database.") { migrate };
+    }
+
+    private static ArchiveDatabase Open() => Setting("Archive__Kind") switch
+    {
+        null or "sqlite" => new SqliteArchive(Path.Combine(
+            Setting("Archive__Folder") ?? throw new ArchiveNotReady("Archive__Folder is missing: the folder that holds the SQLite database."), "archive.db")),
+        "postgresql" => new PostgreSqlArchive(
+            Setting("Archive__ConnectionString") ?? throw new ArchiveNotReady("Archive__Kind is postgresql, but Archive__ConnectionString is missing."), Setting("Archive__AppRole")),
+        var other => throw new ArchiveNotReady($"Archive__Kind is \"{other}\". Allowed are sqlite and postgresql."),
+    };
+
+    private static string? Setting(string name) => Environment.GetEnvironmentVariable(name) is { Length: > 0 } value ? value : null;
+}
