@@ -1,5 +1,8 @@
 using JointPlanner.Archive;
+using JointPlanner.Issuing;
 using JointPlanner.Web.Rooms.Accounts;
+using JointPlanner.Web.Rooms.Revisions;
+using JointPlanner.Web.Rooms.Structure;
 using JointPlanner.Web.Shell;
 using JointPlanner.Web.Start;
 using MudBlazor.Services;
@@ -19,11 +22,15 @@ builder.Services.AddHealthChecks();
 builder.Services.AddHttpContextAccessor();
 builder.Services.AddCascadingAuthenticationState();
 builder.Services.AddScoped<Preferences>();
-builder.Services.AddSingleton(new JointPlanner.Web.Rooms.Structure.PlanDesk(new Dictionary<string, JointPlanner.Engine.Bases.OwnerRuleSet>()));
+// Handed-in files stay in memory: nothing of them is written to a temporary folder.
+builder.Services.Configure<Microsoft.AspNetCore.Http.Features.FormOptions>(form => form.MemoryBufferThreshold = 26 << 20);
+builder.Services.AddSingleton(TrustedRoots.Open(ArchiveSetup.Folder(builder.Configuration, builder.Environment)));
+builder.Services.AddSingleton(new PlanDesk(OwnerRuleShelf.Read(Path.Combine(AppContext.BaseDirectory, "seed-data", "owner-rules"))));
 builder.Services.AddSingleton(DemoMode.From(builder.Configuration));
 builder.AddTrustedProxies();
 builder.AddArchive();
 builder.AddRateLimits();
+builder.Services.AddSingleton<RevisionDesk>();
 
 var app = builder.Build();
 
@@ -43,6 +50,7 @@ app.UseAntiforgery();
 app.MapStaticAssets();
 app.MapHealthChecks("/health");
 app.MapLeaving();
+app.MapSheets();
 app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
 try
 {

@@ -16,9 +16,8 @@ internal static class ArchiveSetup
     internal static void AddArchive(this WebApplicationBuilder builder)
     {
         var (services, configuration) = (builder.Services, builder.Configuration);
-        services.AddSingleton(_ => Open(configuration, builder.Environment));
-        services.AddSingleton<IDbContextFactory<ArchiveContext>>(s => s.GetRequiredService<ArchiveDatabase>());
-        services.AddDbContext<ArchiveContext>((s, options) => s.GetRequiredService<ArchiveDatabase>().Configure(options));
+        services.AddArchive(Open(configuration, builder.Environment));
+        services.AddScoped<Shared.Caller>();
 
         var keys = services.AddDataProtection().SetApplicationName("joint-planner").PersistKeysToDbContext<ArchiveContext>();
         if (configuration["Keys:Certificate"] is { Length: > 0 } certificate)
@@ -49,6 +48,7 @@ internal static class ArchiveSetup
     internal static async Task ReadyArchive(this WebApplication app)
     {
         var archive = app.Services.GetRequiredService<ArchiveDatabase>();
+        app.Lifetime.ApplicationStopped.Register(() => archive.DisposeAsync().AsTask().GetAwaiter().GetResult());
         var migratesHere = archive is SqliteArchive || app.Environment.IsDevelopment();
         if (migratesHere) await archive.Migrate();
         await archive.AssertReady(app.Environment.IsProduction());

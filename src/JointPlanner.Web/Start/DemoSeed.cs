@@ -11,10 +11,11 @@ namespace JointPlanner.Web.Start;
 /// </summary>
 internal static class DemoSeed
 {
-    private static readonly (string Account, string Name, Role Role)[] People =
+    private static readonly (string Account, string Name, Role? Role)[] People =
     [
         ("designer", "Ada Dessauer", Role.Designer), ("checker", "Milan Prochazka", Role.Checker),
         ("contractor", "Rosa Quint", Role.Contractor), ("owner", "Tilde Overgaard", Role.Owner),
+        ("administrator", "Jon Varga", null),
     ];
 
     internal static async Task Sow(WebApplication app)
@@ -23,16 +24,23 @@ internal static class DemoSeed
         var people = scope.ServiceProvider.GetRequiredService<UserManager<Person>>();
         var file = Path.Combine(ArchiveSetup.Folder(app.Configuration, app.Environment), "demo-people.json");
         var passwords = await Passwords(file);
-        var archive = scope.ServiceProvider.GetRequiredService<ArchiveContext>();
         foreach (var (account, name, role) in People)
         {
             if (await people.FindByNameAsync(account) is not null) continue;
-            var person = new Person { UserName = account, Name = name };
+            var person = new Person { UserName = account, Name = name, Administrator = role is null };
             var made = await people.CreateAsync(person, passwords[account]);
             if (!made.Succeeded) throw new ArchiveNotReady($"The demo person {account} could not be made: {string.Join(' ', made.Errors.Select(e => e.Description))}");
         }
 
+        await DemoHouse.Furnish(scope.ServiceProvider, await Ids(people));
         foreach (var (account, _, _) in People) Console.WriteLine($"  demo person  {account,-12} password  {passwords[account]}");
+    }
+
+    private static async Task<IReadOnlyList<(Guid Id, Role? Role)>> Ids(UserManager<Person> people)
+    {
+        var ids = new List<(Guid, Role?)>();
+        foreach (var (account, _, role) in People) ids.Add(((await people.FindByNameAsync(account))!.Id, role));
+        return ids;
     }
 
     private static async Task<Dictionary<string, string>> Passwords(string file)

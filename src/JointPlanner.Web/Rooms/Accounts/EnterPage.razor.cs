@@ -12,7 +12,7 @@ public sealed partial class EnterPage
 
     /// <summary>What was typed.</summary>
     [SupplyParameterFromForm]
-    public EnterEntry? Posted { get; set; }
+    public EnterEntry? Entry { get; set; }
 
     /// <summary>Where the person came from.</summary>
     [SupplyParameterFromQuery(Name = "back")]
@@ -30,16 +30,15 @@ public sealed partial class EnterPage
     [Inject]
     private DemoMode Demo { get; set; } = null!;
 
-    private EnterEntry Entry { get; set; } = new();
-
     /// <inheritdoc/>
-    protected override void OnInitialized() => Entry = Posted ?? new();
+    protected override void OnInitialized() => Entry ??= new();
 
     private async Task SignIn()
     {
-        var person = await People.FindByNameAsync(Entry.Account.Trim());
+        var typed = Entry!;
+        var person = await People.FindByNameAsync(typed.Account.Trim());
         var answer = person is { Active: true }
-            ? await SignIns.PasswordSignInAsync(person, Entry.Password, isPersistent: false, lockoutOnFailure: true)
+            ? await SignIns.PasswordSignInAsync(person, typed.Password, isPersistent: false, lockoutOnFailure: true)
             : SignInResult.Failed;
         if (answer.Succeeded)
         {

@@ -1,36 +1,19 @@
 using JointPlanner.Codes;
-using JointPlanner.Engine;
-using JointPlanner.Engine.Bases;
 using JointPlanner.Exchange.Plans;
-using JointPlanner.Exchange.Printing;
+using JointPlanner.Issuing;
 
 namespace JointPlanner.Web.Rooms.Structure;
 
 /// <summary>Reads and computes plans with the codes and owners' rule sets of this installation.</summary>
-public sealed class PlanDesk
+/// <param name="shelf">The rule sets.</param>
+public sealed class PlanDesk(OwnerRuleShelf shelf)
 {
-    private readonly IReadOnlyDictionary<string, OwnerRuleSet> rules;
-    private readonly PlanReader reader;
-
-    /// <summary>A desk with these rule sets.</summary>
-    public PlanDesk(IReadOnlyDictionary<string, OwnerRuleSet> rules)
-    {
-        this.rules = rules;
-        Known = new KnownWords { Bases = Catalogue.All, OwnerRules = rules.Count == 0 ? null : [.. rules.Keys.Order(StringComparer.Ordinal)] };
-        reader = new PlanReader(Known);
-    }
-
     /// <summary>Words that a plan may use.</summary>
-    public KnownWords Known { get; }
+    public KnownWords Known { get; } = new() { Bases = Catalogue.All, OwnerRules = shelf.Ids };
+
+    /// <summary>Rule sets by id, with their names.</summary>
+    public IEnumerable<(string Id, string Name)> RuleNames => shelf.Names;
 
     /// <summary>What follows from a document as typed.</summary>
-    public Outcome Compute(PlanDocument document, CancellationToken cancellation)
-    {
-        var reading = reader.Read(document);
-        if (reading.Plan is not { } plan || Catalogue.Find(plan.Basis.Code) is not { } basis) return new Outcome(reading, null);
-        // The step to which openings are rounded belongs to the plan's own units, never to what a screen happens to show.
-        var step = DisplayProfile.Of(document.TextAt("display") ?? DisplayProfile.Metric.Id).SettingStep;
-        var owner = rules.TryGetValue(plan.Basis.OwnerRules, out var set) ? new Owner(set, step) : null;
-        return new Outcome(reading, Movements.Of(plan, basis, owner, cancellation));
-    }
+    public Calculation Compute(PlanDocument document, CancellationToken cancellation) => Calculation.Of(document, shelf, cancellation);
 }

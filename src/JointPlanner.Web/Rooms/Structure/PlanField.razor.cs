@@ -42,7 +42,7 @@ public sealed partial class PlanField
 
     private string HintText => ShowHint && asked is { Hint.Length: > 0 } ? $"for instance {asked.Hint}" : "";
 
-    private IReadOnlyList<Fault> Faults => Bench.Outcome.At(Path);
+    private IReadOnlyList<Fault> Faults => [.. Bench.Outcome.Reading.At(Path)];
 
     private string Understood
     {

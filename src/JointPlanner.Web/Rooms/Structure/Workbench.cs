@@ -2,13 +2,14 @@ using JointPlanner.Engine;
 using JointPlanner.Engine.Plans;
 using JointPlanner.Exchange.Plans;
 using JointPlanner.Exchange.Printing;
+using JointPlanner.Issuing;
 
 namespace JointPlanner.Web.Rooms.Structure;
 
 /// <summary>One open structure: the document as typed, its past states, and what follows from it. Parts of the page read it and write through it.</summary>
 public sealed class Workbench : IDisposable
 {
-    private readonly LiveCalculation<PlanDocument, Outcome> calculation;
+    private readonly LiveCalculation<PlanDocument, Calculation> calculation;
     private readonly PlanHistory history;
     private StepPrinter? printer;
     private (Result? Of, IReadOnlyDictionary<string, Engine.Formulas.Step>? Steps) keyed;
@@ -19,10 +20,10 @@ public sealed class Workbench : IDisposable
     /// <param name="known">Codes and rule sets to choose from.</param>
     /// <param name="compute">Reads and computes it.</param>
     /// <param name="isReadOnly">True where the person may look and not write.</param>
-    public Workbench(PlanDocument document, KnownWords known, Func<PlanDocument, CancellationToken, Outcome> compute, bool isReadOnly)
+    public Workbench(PlanDocument document, KnownWords known, Func<PlanDocument, CancellationToken, Calculation> compute, bool isReadOnly)
     {
         (history, Known, IsReadOnly) = (new PlanHistory(document), known, isReadOnly);
-        calculation = new LiveCalculation<PlanDocument, Outcome>(compute);
+        calculation = new LiveCalculation<PlanDocument, Calculation>(compute);
         Outcome = compute(document, CancellationToken.None);
         Drawn = Outcome.Reading.Plan;
     }
@@ -37,7 +38,7 @@ public sealed class Workbench : IDisposable
     public PlanDocument Document => history.Current;
 
     /// <summary>What follows from it.</summary>
-    public Outcome Outcome { get; private set; }
+    public Calculation Outcome { get; private set; }
 
     /// <summary>The last plan that could be read: the drawing keeps it while something typed is still wrong.</summary>
     public Plan? Drawn { get; private set; }

@@ -19,7 +19,6 @@ public sealed class EnterPageTests
         return await browser.PostAsync($"/account/enter{query}", new FormUrlEncodedContent(new Dictionary<string, string>
         {
             ["_handler"] = "enter", ["__RequestVerificationToken"] = token, ["Entry.Account"] = account, ["Entry.Password"] = password,
-            ["Posted.Account"] = account, ["Posted.Password"] = password,
         }));
     }
 

@@ -1,0 +1,78 @@
+using System.Globalization;
+using JointPlanner.Archive.Acts;
+using JointPlanner.Archive.People;
+using JointPlanner.Archive.Revisions;
+using JointPlanner.Archive.Rights;
+using Microsoft.EntityFrameworkCore;
+
+namespace JointPlanner.Web.Rooms.Revisions;
+
+/// <summary>One revision as one person sees it, and what they may do with it.</summary>
+public sealed record RevisionView
+{
+    private static readonly Act[] Asked = [Act.Freeze, Act.Return, Act.Accept, Act.Sign, Act.Issue, Act.Withdraw];
+
+    /// <summary>The revision with its states.</summary>
+    public required Revision Revision { get; init; }
+    /// <summary>Its structure.</summary>
+    public required Archive.Structures.Structure Structure { get; init; }
+    /// <summary>What was frozen; null for a draft.</summary>
+    public FrozenPackage? Package { get; init; }
+    /// <summary>Hash of the sheet as it stands; empty for a draft.</summary>
+    public string DocumentHash { get; init; } = "";
+    /// <summary>Fields that are signed.</summary>
+    public IReadOnlyList<SignatureField> SignedFields { get; init; } = [];
+    /// <summary>Remarks of the checker.</summary>
+    public IReadOnlyList<string> Remarks { get; init; } = [];
+    /// <summary>Roles by which the person may do each act.</summary>
+    public required IReadOnlyDictionary<Act, IReadOnlyList<Role>> Roles { get; init; }
+
+    /// <summary>Whether the person may do the act at all; the archive asks again when it is done.</summary>
+    public bool May(Act act) => Roles[act].Count > 0;
+
+    /// <summary>The field that this person may sign now; null for none.</summary>
+    public SignatureField? MySignature
+    {
+        get
+        {
+            if (Revision.State is not (RevisionState.InCheck or RevisionState.Checked)) return null;
+            foreach (var (role, place) in (ReadOnlySpan<(Role, SignatureField)>)[(Role.Designer, SignatureField.Designer), (Role.Checker, SignatureField.Checker)])
+            {
+                // The checker's signature says that it was checked, so it comes with or after the acceptance.
+                if (place == SignatureField.Checker && Revision.State != RevisionState.Checked) continue;
+                if (Roles[Act.Sign].Contains(role) && !SignedFields.Contains(place)) return place;
+            }
+
+            return null;
+        }
+    }
+
+    /// <summary>An instant in the structure's own zone.</summary>
+    public string Local(DateTimeOffset instant)
+    {
+        var zone = TimeZoneInfo.TryFindSystemTimeZoneById(Structure.Zone, out var found) ? found : TimeZoneInfo.Utc;
+        return string.Create(CultureInfo.InvariantCulture, $"{TimeZoneInfo.ConvertTime(instant, zone):yyyy-MM-dd HH:mm} {Structure.Zone}");
+    }
+
+    /// <summary>Reads it.</summary>
+    /// <exception cref="NotFound">There is none for this person.</exception>
+    internal static async Task<RevisionView> Read(ArchiveScope scope, Guid id)
+    {
+        var revision = await scope.Revisions().Include(r => r.States).FirstOrDefaultAsync(r => r.Id == id) ?? throw new NotFound("revision");
+        var structure = await scope.Structures().FirstAsync(s => s.Id == revision.StructureId);
+        var package = await scope.Packages().FirstOrDefaultAsync(p => p.RevisionId == id);
+        var document = package is null ? null : await scope.Document(id);
+        var roles = new Dictionary<Act, IReadOnlyList<Role>>();
+        foreach (var act in Asked) roles[act] = await scope.RolesFor(act, structure.Id);
+        return new RevisionView
+        {
+            Revision = revision,
+            Structure = structure,
+            Package = package,
+            DocumentHash = document?.Hash ?? "",
+            SignedFields = [.. (document?.Segments ?? []).Select(s => s.Field).OfType<SignatureField>()],
+            Remarks = await scope.Remarks().Where(r => r.RevisionId == id).OrderBy(r => r.Position).Select(r => r.Text).ToListAsync(),
+            Roles = roles,
+        };
+    }
+}
