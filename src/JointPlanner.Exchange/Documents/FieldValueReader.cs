@@ -54,6 +54,8 @@ public static class FieldValueReader
         var isPlainNumber = kind.Units.Contains(Unit.One);
         if (part is not (TextNode or NumberNode)) return Wrong(field, "field.not-quantity", $"{field.Name}: {kind.Words} with its unit belongs here.");
         var text = part is TextNode t ? t.Text : ((NumberNode)part).Text;
+        if (part is NumberNode && !isPlainNumber)
+            return Wrong(field, "quantity.bare-number", $"{field.Name}: {text} has no unit.", $"Probably meant \"{text} {likely.Name}\": write it so, in quotation marks.");
         if (part is TextNode && entry.OrWord.Length > 0 && text == entry.OrWord) return new(null, entry.OrWord, []);
         var read = QuantityText.Parse(text, entry.Kind, likely);
         if (read.Fault is { } fault)
@@ -61,8 +63,6 @@ public static class FieldValueReader
             var near = entry.OrWord.Length > 0 && part is TextNode && Nearest.Of(text, [entry.OrWord]) is { } word ? $" Or did you mean “{word}”?" : "";
             return new(null, null, [new Fault(fault.Id, "", "", $"{field.Name}: {fault.Wrong}", QuantityRange.Allowed(entry, null), fault.Remedy + near)]);
         }
-        if (part is NumberNode && !isPlainNumber)
-            return Wrong(field, "quantity.bare-number", $"{field.Name}: {text} has no unit.", $"Probably meant \"{text} {likely.Name}\": write it so, in quotation marks.");
         return QuantityRange.Check(field, entry, read);
     }
 

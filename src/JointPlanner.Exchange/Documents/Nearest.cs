@@ -3,7 +3,7 @@ namespace JointPlanner.Exchange.Documents;
 /// <summary>The word somebody probably meant.</summary>
 public static class Nearest
 {
-    /// <summary>The candidate with the fewest letters to change (a capital for a small one counts half); null where none is near.</summary>
+    /// <summary>The candidate with the fewest letters to change (two changed round count as one, a capital for a small one as half); null where none is near.</summary>
     public static string? Of(string typed, IEnumerable<string> candidates)
     {
         if (typed.Length > 100) return null;
@@ -16,7 +16,7 @@ public static class Nearest
 
     private static double Distance(string a, string b)
     {
-        var previous = Enumerable.Range(0, b.Length + 1).Select(i => (double)i).ToArray();
+        var (before, previous) = (Array.Empty<double>(), Enumerable.Range(0, b.Length + 1).Select(i => (double)i).ToArray());
         for (var i = 1; i <= a.Length; i++)
         {
             var current = new double[b.Length + 1];
@@ -25,8 +25,9 @@ public static class Nearest
             {
                 var change = a[i - 1] == b[j - 1] ? 0 : char.ToUpperInvariant(a[i - 1]) == char.ToUpperInvariant(b[j - 1]) ? 0.5 : 1;
                 current[j] = Math.Min(previous[j - 1] + change, Math.Min(previous[j], current[j - 1]) + 1);
+                if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1]) current[j] = Math.Min(current[j], before[j - 2] + 1);
             }
-            previous = current;
+            (before, previous) = (previous, current);
         }
         return previous[^1];
     }

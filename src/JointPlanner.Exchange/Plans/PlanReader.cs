@@ -52,7 +52,8 @@ public sealed partial class PlanReader(KnownWords? known = null)
             foreach (var breach in rule.Breaches(check).ToArray())
             {
                 if (!breach.IsWarning) unread.Add(breach.Path);
-                yield return new Fault(breach.Id, breach.Path, TextAt(document, values, breach.Path) ?? "", Said(breach.Wrong), Said(breach.Allowed), Said(breach.Remedy), breach.IsWarning);
+                var typed = document.TextAt(breach.Path) is { } text ? PersonText.Shown(text) : "";
+                yield return new Fault(breach.Id, breach.Path, typed, Said(breach.Wrong), Said(breach.Allowed), Said(breach.Remedy), breach.IsWarning);
 
                 string Said(string sentence) => Place.Replace(sentence, place =>
                     int.TryParse(place.Groups[1].Value, NumberStyles.None, CultureInfo.InvariantCulture, out var number) && number < breach.Numbers.Count

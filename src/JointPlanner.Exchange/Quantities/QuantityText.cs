@@ -93,7 +93,7 @@ public static class QuantityText
             return Failed(row, "quantity.two-numbers", $"“{plain}” holds a space inside a number, or two numbers.",
                 "Write one number without spaces, then the unit.");
         var other = UnitTable.KindMeasuredIn(rest);
-        if (other is not null && row.Units.Length == 1 && row.Units[0] == Unit.One)
+        if (other is not null && row.Units[0] == Unit.One)
             return Failed(row, "quantity.unit-not-wanted", $"“{rest}” is a unit, but {row.Words} has none.", $"Write “{Write(value)}”.");
         if (other is not null)
             return Failed(row, "quantity.other-kind", $"“{rest}” is the unit of {other.Words}, not of {row.Words}.", $"Write {row.Words} in {row.UnitNames}.");

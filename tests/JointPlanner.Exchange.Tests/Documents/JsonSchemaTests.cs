@@ -51,7 +51,7 @@ public sealed class JsonSchemaTests
         {
             Assert.Empty(new PlanReader().Read(document).Faults.Where(f => !f.IsWarning).Select(f => $"{f.Path}: {f.Wrong}"));
             Assert.True(Accepts(PlanSchema, document.ToUtf8()), document.ToJson());
-        }, iter: 200, seed: "0N0XIzNsQ0O7");
+        }, iter: 200, seed: "0N0XIzNsQ0O7", threads: 1);
 
     [Fact]
     public void What_the_schema_refuses_the_reader_refuses_too()
@@ -59,7 +59,7 @@ public sealed class JsonSchemaTests
         var (refused, kept) = (0, 0);
         var fields = TestPlans.Document(TestPlans.Good).Texts().Select(t => t.Key).Where(p => !p.EndsWith("/id", StringComparison.Ordinal)).ToArray();
         string?[] texts = [null, "12", "12 m", "0.5", "-3 °C", "12 MN/m", "abutment", "P 1", "false", "28 d", "1e9", "", "100 %", "9 in", "5'", "rigid", "zz"];
-        Gen.Select(Gen.OneOfConst(fields), Gen.OneOfConst(texts)).Sample((path, text) =>
+        Gen.Select(Gen.OneOf(fields), Gen.OneOf(texts)).Sample((path, text) =>
         {
             var document = TestPlans.Document(TestPlans.Good).With(path, text);
             if (Accepts(PlanSchema, document.ToUtf8()))
@@ -69,7 +69,7 @@ public sealed class JsonSchemaTests
             }
             Interlocked.Increment(ref refused);
             Assert.True(new PlanReader().Read(document).HasErrors, $"{path} = {text}");
-        }, iter: 1500, seed: "0N0XIzNsQ0O8");
+        }, iter: 1500, seed: "0N0XIzNsQ0O8", threads: 1);
         Assert.True(refused > 300 && kept > 300, $"{refused} refused, {kept} kept");
     }
 }

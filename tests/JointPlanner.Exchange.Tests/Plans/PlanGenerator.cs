@@ -6,6 +6,8 @@ namespace JointPlanner.Exchange.Tests.Plans;
 /// <summary>Makes plans that are right: one to four segments in a row over abutments and piers, in metric or US units, with joints between them.</summary>
 internal static class PlanGenerator
 {
+    private static readonly string[] DeckKinds = ["concrete", "composite", "steel"], FarBearings = ["free", "elastomeric", "free"];
+
     private sealed record Span(int Length, int Kind, int Bearing, bool Creeps, int Skew);
 
     public static readonly Gen<PlanDocument> Plans =
@@ -28,7 +30,7 @@ internal static class PlanGenerator
             (document, var segmentPath) = document.WithItem("segments", "s");
             var segment = Id(segmentPath);
             document = document.With($"{segmentPath}/start", Length(start, us)).With($"{segmentPath}/end", Length(end, us))
-                .With($"{segmentPath}/kind", new[] { "concrete", "composite", "steel" }[span.Kind]);
+                .With($"{segmentPath}/kind", DeckKinds[span.Kind]);
             if (span.Creeps)
             {
                 document = document.With($"{segmentPath}/shrinkage/strain", "300 µε").With($"{segmentPath}/shrinkage/source", "generated");
@@ -37,7 +39,7 @@ internal static class PlanGenerator
             }
             document = Bearing(document, segment, support, "fixed", temperature, us);
             (document, support) = Support(document, end, i == spans.Length - 1 ? "abutment" : "pier", us);
-            document = Bearing(document, segment, support, new[] { "free", "elastomeric", "free" }[span.Bearing], temperature, us);
+            document = Bearing(document, segment, support, FarBearings[span.Bearing], temperature, us);
             document = Joint(document, near, segment, span, i > 0 && spans[i - 1].Creeps, span.Creeps, temperature, us);
             (near, station) = (segment, end);
         }

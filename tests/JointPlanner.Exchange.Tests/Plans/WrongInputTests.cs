@@ -331,7 +331,7 @@ public sealed class WrongInputTests
     public void Pads_belong_to_elastomeric_lines_and_to_no_other()
     {
         Assert.Equal("bearings.no-pads", Only(Without("bearings/b1/pads"), "bearings/b1/pads").Id);
-        Assert.Equal("bearings.pads-unused", Only(With("bearings/b1/kind", "fixed"), "bearings/b1/pads").Id);
+        Assert.Equal("bearings.pads-unused", Only(With("bearings/b1/kind", "free"), "bearings/b1/pads").Id);
     }
 
     [Fact]

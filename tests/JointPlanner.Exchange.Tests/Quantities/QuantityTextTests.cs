@@ -158,17 +158,17 @@ public sealed class QuantityTextTests
 
     [Fact]
     public void What_is_written_reads_back_as_the_same_value() =>
-        Gen.Select(Gen.OneOfConst([.. UnitTable.Kinds.Where(k => k.Kind != Quantity.Count)]), Gen.Double[-1e7, 1e7], Gen.Int[-9, 2]).SelectMany((kind, number, power) =>
-            Gen.OneOfConst([.. kind.Units]).Select(unit => (kind, unit, si: unit.ToSi(Math.Round(number * Math.Pow(10, power), 6)))))
+        Gen.Select(Gen.OneOf(UnitTable.Kinds.Where(k => k.Kind != Quantity.Count).ToArray()), Gen.Double[-1e7, 1e7], Gen.Int[-9, 2]).SelectMany((kind, number, power) =>
+            Gen.OneOf(kind.Units.ToArray()).Select(unit => (kind, unit, si: unit.ToSi(Math.Round(number * Math.Pow(10, power), 6)))))
         .Sample(c =>
         {
             var text = QuantityText.Write(c.si, c.unit);
             var read = QuantityText.Parse(text, c.kind.Kind);
             // A value that no decimal in that unit hits exactly comes within the last bit.
             Assert.True(Math.Abs(read.Value - c.si) <= Math.Abs(c.si) * 3e-16 + (c.kind.Kind.IsReading ? 1e-13 : 0), $"{text} reads as {read.Value:R}, not {c.si:R}; {read.Fault?.Wrong}");
-        }, iter: 3000, seed: "0N0XIzNsQ0O2");
+        }, iter: 3000, seed: "0N0XIzNsQ0O2", threads: 1);
 
-    // An outside library of units: what it makes of a number in a unit is what we make of the same text.
+    // An outside library of units, whose own factors of force are rounded at the ninth digit: what it makes of a number in a unit is what we make of the same text.
     private static readonly (Quantity Kind, Unit Unit, Func<double, double> ToSi)[] Outside =
     [
         (Quantity.Length, Unit.Foot, v => UnitsNet.Length.From(v, LengthUnit.Foot).Meters),
@@ -214,19 +214,19 @@ public sealed class QuantityTextTests
 
     [Fact]
     public void An_outside_library_of_units_reads_the_same_values() =>
-        Gen.Select(Gen.OneOfConst(Outside), Gen.Double[-5000, 5000]).Sample((outside, number) =>
+        Gen.Select(Gen.OneOf(Outside), Gen.Double[-5000, 5000]).Sample((outside, number) =>
         {
             var rounded = Math.Round(number, 4);
             var text = rounded.ToString(CultureInfo.InvariantCulture) + " " + outside.Unit.Name;
             var (ours, theirs) = (QuantityText.Parse(text, outside.Kind), outside.ToSi(rounded));
-            Assert.True(Math.Abs(ours.Value - theirs) <= Math.Abs(theirs) * 1e-9 + 1e-12, $"{text}: {ours.Value:R} and {theirs:R}; {ours.Fault?.Wrong}");
-        }, iter: 4000, seed: "0N0XIzNsQ0O3");
+            Assert.True(Math.Abs(ours.Value - theirs) <= Math.Abs(theirs) * 1e-8 + 1e-12, $"{text}: {ours.Value:R} and {theirs:R}; {ours.Fault?.Wrong}");
+        }, iter: 4000, seed: "0N0XIzNsQ0O3", threads: 1);
 
     [Fact]
     public void Any_text_at_all_is_read_or_refused_and_never_throws() =>
-        Gen.Select(Gen.OneOfConst([.. Quantity.All]), Gen.Char["0123456789.,+-−/ '\"eEmftin°CFKN½×⁻\u2009\u00A0\0µ∞"].Array[0, 20]).Sample((kind, letters) =>
+        Gen.Select(Gen.OneOf(Quantity.All.ToArray()), Gen.Char["0123456789.,+-−/ '\"eEmftin°CFKN½×⁻\u2009\u00A0\0µ∞"].Array[0, 20]).Sample((kind, letters) =>
         {
             var read = QuantityText.Parse(new string(letters), kind);
             Assert.True(read.Fault is null ? double.IsFinite(read.Value) : double.IsNaN(read.Value));
-        }, iter: 20000, seed: "0N0XIzNsQ0O4");
+        }, iter: 20000, seed: "0N0XIzNsQ0O4", threads: 1);
 }

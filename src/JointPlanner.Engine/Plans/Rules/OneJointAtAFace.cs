@@ -12,7 +12,7 @@ public sealed class OneJointAtAFace : PlanRule
             foreach (var (word, body, isUpper) in new[] { ("near", joint.Near, true), ("far", joint.Far, false) })
             {
                 var path = $"joints/{joint.Id}/{word}";
-                if (!check.Knows(path) || check.SegmentOf(body) is null || ends.TryAdd((body, isUpper), joint.Id)) continue;
+                if (!check.Knows($"joints/{joint.Id}/near", $"joints/{joint.Id}/far") || check.SegmentOf(body) is null || ends.TryAdd((body, isUpper), joint.Id)) continue;
                 yield return new("joints.same-face", path,
                     $"Joints {ends[(body, isUpper)]} and {joint.Id} both lie at the {(isUpper ? "upper" : "lower")} end of segment {body}.",
                     "Allowed: one joint at a deck end.", "Take one of them out, or name the body that it belongs to.");
