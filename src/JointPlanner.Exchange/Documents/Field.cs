@@ -40,16 +40,33 @@ public sealed record Extent(string Low, string High);
 /// <param name="Allowed">What is allowed; beyond it is a fault.</param>
 public sealed record QuantityEntry(Quantity Kind, Extent Allowed) : Entry
 {
+    private readonly (double Low, double High) allowed = BoundsOf(Allowed, Kind);
+    private readonly (double Low, double High) usual;
+
     /// <summary>What is usual; beyond it is a warning. Null where there is none.</summary>
-    public Extent? Usual { get; init; }
+    public Extent? Usual
+    {
+        get;
+        init => (field, usual) = (value, value is null ? default : BoundsOf(value, Kind));
+    }
+
+    /// <summary>True where the value, in SI, is allowed.</summary>
+    public bool Allows(double value) => value >= allowed.Low && value <= allowed.High;
+
+    /// <summary>True where the value, in SI, is usual, or nothing is said about what is.</summary>
+    public bool IsUsual(double value) => Usual is null || (value >= usual.Low && value <= usual.High);
 
     /// <summary>A word that may stand instead of a quantity; empty for none.</summary>
     public string OrWord { get; init; } = "";
 
     /// <summary>A bound in SI.</summary>
-    public double ValueOf(string bound) => QuantityText.Parse(bound, Kind) is { Fault: null } read
+    public double ValueOf(string bound) => ValueOf(bound, Kind);
+
+    private static (double, double) BoundsOf(Extent extent, Quantity kind) => (ValueOf(extent.Low, kind), ValueOf(extent.High, kind));
+
+    private static double ValueOf(string bound, Quantity kind) => QuantityText.Parse(bound, kind) is { Fault: null } read
         ? read.Value
-        : throw new InvalidOperationException($"“{bound}” is not {UnitTable.Of(Kind).Words}.");
+        : throw new InvalidOperationException($"“{bound}” is not {UnitTable.Of(kind).Words}.");
 }
 
 /// <summary>A plain number: a factor or a share.</summary>

@@ -13,16 +13,16 @@ internal static class QuantityRange
     public static FieldValue Check(Field field, QuantityEntry entry, QuantityReading read)
     {
         var (value, unit) = (read.Value, read.Unit ?? Unit.One);
-        if (!Within(entry, entry.Allowed, value))
+        if (!entry.Allows(value))
             return new(null, null, [entry.Kind.IsReading && value < AbsoluteZero
                 ? new Fault("field.absolute-zero", "", "", $"{field.Name}: {Neat(value, unit)} is below absolute zero ({Neat(AbsoluteZero, unit)}).", Allowed(entry, unit),
-                    "Correct the temperature." + OtherScale(entry, entry.Usual ?? entry.Allowed, value, unit))
+                    "Correct the temperature." + OtherScale(entry, value, unit))
                 : new Fault("field.range", "", "", $"{field.Name}: {Neat(value, unit)} is out of range.", Allowed(entry, unit),
-                    "Correct the value or its unit." + OtherScale(entry, entry.Usual ?? entry.Allowed, value, unit))]);
-        if (entry.Usual is { } usual && !Within(entry, usual, value))
+                    "Correct the value or its unit." + OtherScale(entry, value, unit))]);
+        if (entry.Usual is { } usual && !entry.IsUsual(value))
             return new(value, null, [new Fault("field.unusual", "", "", $"{field.Name}: {Neat(value, unit)} is unusual.",
                 $"Usual: from {Bound(entry, usual.Low, unit)} to {Bound(entry, usual.High, unit)}.",
-                "Check the value and its unit; leave it where it is meant." + OtherScale(entry, usual, value, unit), IsWarning: true)]);
+                "Check the value and its unit; leave it where it is meant." + OtherScale(entry, value, unit), IsWarning: true)]);
         return new(value, null, []);
     }
 
@@ -33,16 +33,13 @@ internal static class QuantityRange
         return $"Allowed: {kind.Words} from {Bound(entry, entry.Allowed.Low, unit)} to {Bound(entry, entry.Allowed.High, unit)}, in {kind.UnitNames}{word}.";
     }
 
-    private static bool Within(QuantityEntry entry, Extent extent, double value) =>
-        value >= entry.ValueOf(extent.Low) && value <= entry.ValueOf(extent.High);
-
     /// <summary>A number typed in one temperature scale and meant in the other is the commonest slip of all.</summary>
-    private static string OtherScale(QuantityEntry entry, Extent usual, double value, Unit unit)
+    private static string OtherScale(QuantityEntry entry, double value, Unit unit)
     {
         if (!entry.Kind.IsReading) return "";
         var other = unit == Unit.Celsius ? Unit.Fahrenheit : Unit.Celsius;
         var meant = other.ToSi(unit.FromSi(value));
-        return Within(entry, usual, meant)
+        return entry.Allows(meant) && entry.IsUsual(meant)
             ? $" Was it meant in {other.Name}? {Neat(meant, other)} is {Neat(meant, unit)}."
             : "";
     }

@@ -74,7 +74,7 @@ public sealed class PlantedFaultsTests
     private static void AssertFound((string Path, string Id, Planting Plant)[] planted)
     {
         // What changes the addresses of items, or is written as text, comes last.
-        var document = planted.OrderBy(p => p.Id is "id.shape" ? 2 : p.Id.StartsWith("form.", StringComparison.Ordinal) ? 1 : 0)
+        var document = planted.OrderBy(p => p.Id is "form.repeated" ? 3 : p.Id is "id.shape" ? 2 : p.Id.StartsWith("form.", StringComparison.Ordinal) ? 1 : 0)
             .Aggregate(TestPlans.Document(TestPlans.Good), (d, fault) => fault.Plant(d));
         var expected = planted.Select(p => (planted.Any(o => o.Id == "id.shape") ? p.Path.Replace("movements/m2", "movements/#2", StringComparison.Ordinal) : p.Path, p.Id)).Order();
 

@@ -17,10 +17,9 @@ public sealed class DeckIsHeld : PlanRule
             grows = false;
             foreach (var bearing in plan.Bearings.Where(b => !held.Contains(b.Segment) || !held.Contains(b.On)))
             {
+                if (bearing.Kind == BearingKind.Free && check.Knows($"bearings/{bearing.Id}/kind")) continue;
                 // What could not be read is taken to hold: no fault is made of another one.
-                var isKnown = check.Knows($"bearings/{bearing.Id}/kind", $"bearings/{bearing.Id}/on");
-                if (isKnown && bearing.Kind == BearingKind.Free) continue;
-                var isOnSegment = isKnown && check.SegmentOf(bearing.On) is not null;
+                var isOnSegment = check.SegmentOf(bearing.On) is not null && check.Knows($"bearings/{bearing.Id}/kind", $"bearings/{bearing.Id}/on");
                 if (!isOnSegment || held.Contains(bearing.On)) grows |= held.Add(bearing.Segment);
                 else if (held.Contains(bearing.Segment)) grows |= held.Add(bearing.On);
             }
