@@ -65,7 +65,14 @@ public class ArchiveContextTests
         await using var context = world.Archive.CreateDbContext();
         context.Add(new SettingPoint
         {
-            SettingRecordId = Guid.CreateVersion7(), Ordinal = 1, Place = "axis", Opening = value, Direction = "normal", Temperature = 1, Method = "air", Uncertainty = 1,
+            SettingRecordId = Guid.CreateVersion7(),
+            Ordinal = 1,
+            Place = "axis",
+            Opening = value,
+            Direction = "normal",
+            Temperature = 1,
+            Method = "air",
+            Uncertainty = 1,
         });
         var refusal = await Assert.ThrowsAsync<ArgumentOutOfRangeException>(() => context.SaveChangesAsync());
         Assert.Contains("SettingPoint.Opening", refusal.Message, StringComparison.Ordinal);

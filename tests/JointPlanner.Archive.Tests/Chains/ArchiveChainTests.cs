@@ -107,7 +107,13 @@ public class ArchiveChainTests
         {
             var planted = new Reading
             {
-                StructureId = world.StructureId, Joint = "j9", Device = "none", Point = "axis", Date = new DateOnly(2031, 6, 1), Opening = 0.03, Direction = "along the deck",
+                StructureId = world.StructureId,
+                Joint = "j9",
+                Device = "none",
+                Point = "axis",
+                Date = new DateOnly(2031, 6, 1),
+                Opening = 0.03,
+                Direction = "along the deck",
                 PersonId = world.Kim.Id,
             };
             await ArchiveChain.Append(context, ChainName.Joint(world.StructureId, "j9"), planted, world.Clock.Now, CancellationToken.None);
