@@ -33,6 +33,21 @@ public class ArchiveContextTests
     }
 
     [Theory, BothDatabases]
+    public async Task An_instant_is_kept_to_the_microsecond_on_both_databases_alike(Kind kind)
+    {
+        await using var world = await World.Make(kind);
+        var fine = new DateTimeOffset(2031, 7, 1, 12, 0, 0, TimeSpan.Zero).AddTicks(17);
+        await using (var context = world.Archive.CreateDbContext())
+        {
+            context.Structures.Add(new Structure { OrganisationId = world.Elsewhere.Id, Name = "x", Zone = "UTC", CreatedAt = fine });
+            await context.SaveChangesAsync();
+        }
+
+        await using var scope = await world.As(world.Stranger);
+        Assert.Equal(fine.AddTicks(-7), (await scope.Structures().SingleAsync()).CreatedAt);
+    }
+
+    [Theory, BothDatabases]
     public async Task The_second_of_two_writers_of_one_row_is_told(Kind kind)
     {
         await using var world = await World.Make(kind);
