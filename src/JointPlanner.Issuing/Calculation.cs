@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using JointPlanner.Codes;
 using JointPlanner.Engine;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
 using JointPlanner.Exchange.Documents;
 using JointPlanner.Exchange.OwnerRules;
@@ -34,6 +35,13 @@ public sealed record Calculation
 
     /// <summary>Faults and warnings of the plan and of the rule set.</summary>
     public ImmutableArray<Fault> Faults => [.. Reading.Faults, .. Owner?.Faults ?? []];
+
+    /// <summary>What stands in the way of freezing, as sentences: faults, and findings without which nothing can be computed.</summary>
+    public IReadOnlyList<string> Obstacles =>
+    [
+        .. Faults.Where(f => !f.IsWarning).Select(f => $"{f.Path}: {f.Wrong} {f.Remedy}"),
+        .. (Result?.Findings ?? []).Where(f => f.Severity == Severity.Error).Select(f => $"{f.Path}: {FindingText.Of(f, Profile)}"),
+    ];
 
     /// <summary>The display profile that the plan asks for.</summary>
     public DisplayProfile Profile => ProfileOf(Reading.Document);

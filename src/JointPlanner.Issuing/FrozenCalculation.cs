@@ -18,10 +18,8 @@ public sealed record FrozenCalculation(byte[] Package, byte[] Results, PdfFile S
     /// <exception cref="InvalidOperationException">Faults stand in the way; the message names the first.</exception>
     public static FrozenCalculation Of(Calculation calculation, IReadOnlyCollection<Confirmation> confirmations, SheetTitle title)
     {
-        if (calculation.Result is not { } result)
-            throw new InvalidOperationException(calculation.Faults.FirstOrDefault(f => !f.IsWarning) is { } fault
-                ? $"{fault.Path}: {fault.Wrong} {fault.Remedy}"
-                : "Nothing was computed.");
+        if (calculation.Result is not { } result || calculation.Obstacles.Count > 0)
+            throw new InvalidOperationException(calculation.Obstacles is [var first, ..] ? first : "Nothing was computed.");
         // Only what this calculation uses goes into its package: another confirmation must not change its hash.
         var used = result.MemoryValues.Select(v => v.ValueId).ToHashSet();
         var package = calculation.Package(confirmations.Where(c => used.Contains(c.ValueId))).ToUtf8();

@@ -50,6 +50,15 @@ public sealed class CalculationTests
         Assert.Contains("live load", open.Template, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void A_plan_whose_basis_is_silent_on_temperatures_cannot_be_frozen()
+    {
+        var document = SeedData.Structure("sorrel-creek-crossing").With("basis/code", "own").Without("basis/profile").Without("basis/setting-doubt").Without("basis/safety");
+        var calculation = Calculation.Of(document, SeedData.Shelf);
+        Assert.Contains(calculation.Obstacles, o => o.Contains("effective temperature", StringComparison.Ordinal));
+        Assert.Throws<InvalidOperationException>(() => FrozenCalculation.Of(calculation, [], new SheetTitle { Revision = "A", Date = DateTimeOffset.UnixEpoch }));
+    }
+
     private static byte[] Results(Calculation calculation, byte[] package) =>
         ResultsFile.ToUtf8(ResultsFile.Of(calculation.Result!, ProgramVersion.Number, ContentHash.Of(package)));
 }

@@ -25,11 +25,11 @@ public sealed class RevisionDesk(
         var text = view.Revision.PlanText;
         var document = PlanDocument.Parse(text).Document ?? throw new InvalidDataException("The stored plan cannot be read.");
         var calculation = await Task.Run(() => plans.Compute(document, CancellationToken.None));
-        IReadOnlyList<string> faults = [.. calculation.Faults.Where(f => !f.IsWarning).Select(f => $"{f.Path}: {f.Wrong} {f.Remedy}")];
+        var faults = calculation.Obstacles;
         if (faults.Count > 0 || calculation.Result is null)
             throw new ActRefused(RefusalReason.PlanFaults, $"The plan has {faults.Count} fault(s), first: {(faults.Count > 0 ? faults[0] : "nothing was computed.")} Mend them, save for all, then freeze.");
         var inForce = await Confirmations.InForce(scope, view.Structure.OrganisationId);
-        var owner = await scope.Organisations().Where(o => o.Id == view.Structure.OrganisationId).Select(o => o.Name).FirstOrDefaultAsync();
+        var owner = await scope.Owners().Where(o => o.Id == view.Structure.OrganisationId).Select(o => o.Name).FirstOrDefaultAsync();
         var frozen = FrozenCalculation.Of(calculation, [.. inForce.Values.Select(Worded)], new SheetTitle
         {
             Revision = view.Revision.Number.ToString(System.Globalization.CultureInfo.InvariantCulture),

@@ -49,7 +49,7 @@ public sealed partial class NewStructurePage
     private IReadOnlyList<(string, string)> Rules => [.. Desk.RuleNames, ("", "none: movements only")];
 
     private IReadOnlyList<(string, string)> Zones =>
-        [.. (Desk.Known.Bases?.FirstOrDefault(b => b.Id == beginning.Code)?.ClimateZones ?? []).Select(z => (z, z)).Prepend(("", "choose"))];
+        Desk.Known.Bases?.FirstOrDefault(b => b.Id == beginning.Code)?.ClimateZones is { Count: > 0 } zones ? [("", "choose"), .. zones.Select(z => (z, z))] : [];
 
     private string FixedAt => beginning.FixedAt.ToString(CultureInfo.InvariantCulture);
 
@@ -60,7 +60,7 @@ public sealed partial class NewStructurePage
     protected override void OnInitialized()
     {
         beginning.Display = IsUs ? "us" : "metric";
-        beginning.Code = Codes is [var first, ..] ? first.Item1 : "";
+        beginning.Code = Codes.FirstOrDefault(c => c.Item1.EndsWith($"-{beginning.Display}", StringComparison.Ordinal), Codes[0]).Item1;
         beginning.OwnerRules = Rules.FirstOrDefault(r => r.Item1.EndsWith(beginning.Display, StringComparison.Ordinal), Rules[0]).Item1;
     }
 
