@@ -7,7 +7,9 @@ public sealed class LedgerGridTests
 {
     private static readonly ElevationColumns Columns = Elevation.Of(new ElevationRequest
     {
-        Plan = DemoDeck.Of(0, 30, 75, 100), Length = m => m.ToString(CultureInfo.InvariantCulture), Paper = ElevationPaper.Screen,
+        Plan = DemoDeck.Of(0, 30, 75, 100),
+        Length = m => m.ToString(CultureInfo.InvariantCulture),
+        Paper = ElevationPaper.Screen,
     }).Columns;
 
     [Fact]

@@ -4,8 +4,8 @@ using JointPlanner.Archive.Chains;
 using JointPlanner.Archive.Confirming;
 using JointPlanner.Archive.Revisions;
 using JointPlanner.Archive.Setting;
-using Microsoft.EntityFrameworkCore.Metadata;
 using Microsoft.EntityFrameworkCore;
+using Microsoft.EntityFrameworkCore.Metadata;
 
 namespace JointPlanner.Archive.Guarding;
 

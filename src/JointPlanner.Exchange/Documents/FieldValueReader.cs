@@ -21,15 +21,15 @@ public static class FieldValueReader
     /// <param name="outsideWords">Words known outside the document, by what they name.</param>
     public static FieldValue Read(
         Field field, DocumentNode part, bool showsUs, IReadOnlyDictionary<string, IReadOnlyCollection<string>> outsideWords) => field.Entry switch
-    {
-        QuantityEntry entry => Quantity(field, entry, part, showsUs),
-        RatioEntry entry => Ratio(field, entry, part),
-        CountEntry entry => Count(field, entry, part),
-        FalseEntry => part is TruthNode { Value: false } ? new(0, "false", []) : Wrong(field, "field.not-false", "Only false may stand here."),
-        TruthEntry => part is TruthNode { Value: { } truth } ? new(truth ? 1 : 0, truth ? "true" : "false", []) : Wrong(field, "field.not-truth", $"{field.Name}: true or false belongs here."),
-        _ when part is not TextNode => Wrong(field, "field.not-text", $"{field.Name}: a text in quotation marks belongs here."),
-        _ => Words(field, ((TextNode)part).Text, outsideWords),
-    };
+        {
+            QuantityEntry entry => Quantity(field, entry, part, showsUs),
+            RatioEntry entry => Ratio(field, entry, part),
+            CountEntry entry => Count(field, entry, part),
+            FalseEntry => part is TruthNode { Value: false } ? new(0, "false", []) : Wrong(field, "field.not-false", "Only false may stand here."),
+            TruthEntry => part is TruthNode { Value: { } truth } ? new(truth ? 1 : 0, truth ? "true" : "false", []) : Wrong(field, "field.not-truth", $"{field.Name}: true or false belongs here."),
+            _ when part is not TextNode => Wrong(field, "field.not-text", $"{field.Name}: a text in quotation marks belongs here."),
+            _ => Words(field, ((TextNode)part).Text, outsideWords),
+        };
 
     /// <summary>What a field allows, a sentence.</summary>
     public static string AllowedBy(Field field) => field.Entry switch

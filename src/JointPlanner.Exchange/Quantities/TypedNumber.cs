@@ -13,7 +13,15 @@ internal static partial class TypedNumber
     private const string SuperscriptDigits = "⁰¹²³⁴⁵⁶⁷⁸⁹";
     private static readonly Dictionary<char, string> Fractions = new()
     {
-        ['½'] = "1/2", ['¼'] = "1/4", ['¾'] = "3/4", ['⅓'] = "1/3", ['⅔'] = "2/3", ['⅛'] = "1/8", ['⅜'] = "3/8", ['⅝'] = "5/8", ['⅞'] = "7/8",
+        ['½'] = "1/2",
+        ['¼'] = "1/4",
+        ['¾'] = "3/4",
+        ['⅓'] = "1/3",
+        ['⅔'] = "2/3",
+        ['⅛'] = "1/8",
+        ['⅜'] = "3/8",
+        ['⅝'] = "5/8",
+        ['⅞'] = "7/8",
     };
 
     [GeneratedRegex(@"(?<=[0-9])[\u2009\u202F\u00A0\u2007](?=[0-9]{3}(?![0-9]))")]

@@ -4,8 +4,8 @@ using JointPlanner.Engine.Combining;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Exchange.Printing;
 using JointPlanner.Pdf;
-using Words = JointPlanner.Pdf.Words;
 using Said = JointPlanner.Exchange.Printing.Words;
+using Words = JointPlanner.Pdf.Words;
 
 namespace JointPlanner.Sheets.Parts;
 

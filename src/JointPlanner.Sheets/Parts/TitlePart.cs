@@ -18,7 +18,8 @@ internal static class TitlePart
             new("Designer", facts.Designer), new("Checker", facts.Checker),
             new("Code", facts.Basis), new("Code folder", facts.BasisId),
             new("Owner's rules", facts.OwnerRules), new("Units", page.Profile.Name),
-        ]) { TwoAcross = true };
+        ])
+        { TwoAcross = true };
         yield return new KeyValues(
         [
             new("Package SHA-256", SheetFacts.Digest(facts.Package)), new("Results SHA-256", SheetFacts.Digest(facts.Results)),

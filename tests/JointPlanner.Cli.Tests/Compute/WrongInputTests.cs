@@ -87,7 +87,8 @@ public sealed class WrongInputTests : IDisposable
                 bearing!["kind"] = "free";
                 bearing.AsObject().Remove("pads");
             }
-        },
+        }
+        ,
         "below absolute zero" => p => p["climate"]!["shade-min"] = "-300 °C",
         "degrees Fahrenheit typed as Celsius" => p => p["climate"]!["shade-max"] = "60 °C",
         "a skew of 90°" => p => p["joints"]![0]!["skew"] = "90°",
@@ -96,14 +97,16 @@ public sealed class WrongInputTests : IDisposable
             p["supports"]![2]!["station"] = "643 m";
             p["supports"]![3]!["station"] = "680 m";
             p["segments"]![0]!["end"] = "680.6 m";
-        },
+        }
+        ,
         "a bare number where a quantity belongs" => p => p["supports"]![1]!["station"] = 42,
         "a comma that may group or divide" => p => p["supports"]![1]!["station"] = "1,234 m",
         "too many supports" => p =>
         {
             for (var i = 0; i < 2001; i++)
                 p["supports"]!.AsArray().Add(new JsonObject { ["id"] = $"q{i}", ["station"] = $"{200 + i} m", ["kind"] = "pier" });
-        },
+        }
+        ,
         _ => throw new ArgumentOutOfRangeException(nameof(what)),
     };
 }

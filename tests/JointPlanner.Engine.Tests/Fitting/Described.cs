@@ -22,7 +22,11 @@ internal static class Described
 
     public static Joint Joint(double setAt, double skew = 0) => new()
     {
-        Id = "j1", Near = "a1", Far = "deck", SettingTemperature = setAt, Skew = skew,
+        Id = "j1",
+        Near = "a1",
+        Far = "deck",
+        SettingTemperature = setAt,
+        Skew = skew,
     };
 
     /// <summary>One segment's thermal part; the window's rate is the same unless given.</summary>

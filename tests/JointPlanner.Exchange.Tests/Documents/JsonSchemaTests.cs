@@ -1,9 +1,9 @@
 using System.Text.Json;
 using CsCheck;
-using Json.Schema;
 using JointPlanner.Exchange.OwnerRules;
 using JointPlanner.Exchange.Plans;
 using JointPlanner.Exchange.Tests.Plans;
+using Json.Schema;
 using OurSchema = JointPlanner.Exchange.Documents.JsonSchema;
 
 namespace JointPlanner.Exchange.Tests.Documents;

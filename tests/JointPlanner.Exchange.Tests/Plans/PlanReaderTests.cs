@@ -49,8 +49,15 @@ public sealed class PlanReaderTests
         Assert.Equal(
             new BearingLine
             {
-                Id = "b1", Mark = "B1", Segment = "west", On = "a1", Station = 0, Kind = BearingKind.Elastomeric, Pads = new Pads(4, 0.9e6, 0.16, 0.06),
-                SettingTemperature = 12, SettingAge = 60 * 86400.0,
+                Id = "b1",
+                Mark = "B1",
+                Segment = "west",
+                On = "a1",
+                Station = 0,
+                Kind = BearingKind.Elastomeric,
+                Pads = new Pads(4, 0.9e6, 0.16, 0.06),
+                SettingTemperature = 12,
+                SettingAge = 60 * 86400.0,
             }, plan.Bearings[0]);
         Assert.Equal(("west", 60.0, BearingKind.Free), (plan.Bearings[2].On, plan.Bearings[2].Station, plan.Bearings[2].Kind));
         var joint = plan.Joints[0];

@@ -11,17 +11,17 @@ internal static class CommonFigures
 
     public static readonly FamilyFigure GreatestRacking =
         new("greatest-racking", Quantity.Movement, false, "greatest movement along the joint line")
-            { Symbol = "R_max", JudgedBy = Column.Racking };
+        { Symbol = "R_max", JudgedBy = Column.Racking };
 
     public static readonly FamilyFigure LeastInstallationOpening =
         new("least-installation-opening", Quantity.Opening, false, "least opening at which the joint can be put in")
-            { Symbol = "G_i,min", Measure = Measure.Normal };
+        { Symbol = "G_i,min", Measure = Measure.Normal };
 
     public static readonly FamilyFigure GreatestInstallationOpening =
         new("greatest-installation-opening", Quantity.Opening, false, "greatest opening at which the joint can be put in")
-            { Symbol = "G_i,max", Measure = Measure.Normal };
+        { Symbol = "G_i,max", Measure = Measure.Normal };
 
     public static readonly FamilyFigure ReferenceOpening =
         new("reference-opening", Quantity.Opening, false, "opening at the owner's reference temperature, where the set value goes by one")
-            { Symbol = "G_ref", Measure = Measure.Normal };
+        { Symbol = "G_ref", Measure = Measure.Normal };
 }

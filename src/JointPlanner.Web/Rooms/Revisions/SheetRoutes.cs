@@ -63,8 +63,13 @@ internal static class SheetRoutes
             using var held = opened.Key ?? throw new ActRefused(RefusalReason.SignatureObjection, opened.Text);
             var signed = await Signer.SignAsync(stored.Bytes, new SignRequest
             {
-                Field = SignatureJudge.NameOf(field), Certificate = held.Certificate, Chain = held.Chain, Instant = clock.GetUtcNow(),
-                SignerName = scope.Person.Name, Reason = field == SignatureField.Designer ? "Designed by" : "Checked by", ExpectedSha256 = expected,
+                Field = SignatureJudge.NameOf(field),
+                Certificate = held.Certificate,
+                Chain = held.Chain,
+                Instant = clock.GetUtcNow(),
+                SignerName = scope.Person.Name,
+                Reason = field == SignatureField.Designer ? "Designed by" : "Checked by",
+                ExpectedSha256 = expected,
             });
             await desk.Sign(call, id, field, expected, signed.Bytes);
         });

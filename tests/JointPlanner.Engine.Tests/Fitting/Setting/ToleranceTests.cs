@@ -52,7 +52,12 @@ public sealed class ToleranceTests
     /// <summary>A joint that hardly moves, with a window of a few tenths of a millimetre: what only fine steps and gauges can set.</summary>
     private static Case Tightened(Case c) => c with
     {
-        Rate = c.Rate * 0.003, Range = c.Range * 0.01, Shrinks = 0, Brakes = 0, UMeasure = c.UMeasure * 0.2, IsTight = true,
+        Rate = c.Rate * 0.003,
+        Range = c.Range * 0.01,
+        Shrinks = 0,
+        Brakes = 0,
+        UMeasure = c.UMeasure * 0.2,
+        IsTight = true,
     };
 
     private static readonly List<Made> Rows = [.. Make()];

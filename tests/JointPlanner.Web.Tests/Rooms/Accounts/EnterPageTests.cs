@@ -18,7 +18,10 @@ public sealed class EnterPageTests
         var token = Regex.Match(form, "name=\"__RequestVerificationToken\" value=\"([^\"]+)\"").Groups[1].Value;
         return await browser.PostAsync($"/account/enter{query}", new FormUrlEncodedContent(new Dictionary<string, string>
         {
-            ["_handler"] = "enter", ["__RequestVerificationToken"] = token, ["Entry.Account"] = account, ["Entry.Password"] = password,
+            ["_handler"] = "enter",
+            ["__RequestVerificationToken"] = token,
+            ["Entry.Account"] = account,
+            ["Entry.Password"] = password,
         }));
     }
 

@@ -10,16 +10,16 @@ public sealed class CompressionSeal : JointFamily
         new("width", Quantity.Size, true, "uncompressed width of the seal") { Symbol = "W" };
     internal static readonly FamilyFigure LeastShare =
         new("least-width-share", Quantity.Ratio, true, "share of its width to which the seal may be compressed")
-            { Symbol = "s_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "s_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure GreatestShare =
         new("greatest-width-share", Quantity.Ratio, true, "share of its width beyond which the seal no longer presses")
-            { Symbol = "s_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "s_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure SetShare =
         new("set-width-share", Quantity.Ratio, false, "share of its width at the owner's reference temperature")
-            { Symbol = "s_ref", Measure = Measure.Normal };
+        { Symbol = "s_ref", Measure = Measure.Normal };
     internal static readonly FamilyFigure RackingShare =
         new("greatest-racking-share", Quantity.Ratio, false, "greatest movement along the joint line as a share of the width")
-            { Symbol = "s_R", JudgedBy = Column.Racking };
+        { Symbol = "s_R", JudgedBy = Column.Racking };
 
     /// <inheritdoc/>
     public override string Word => "compression-seal";

@@ -11,16 +11,16 @@ public sealed class FingerJoint : JointFamily
 {
     internal static readonly FamilyFigure Length =
         new("finger-length", Quantity.Size, true, "length of the fingers from root to tip; its direction of measure is that of the fingers")
-            { Symbol = "ℓ", Measure = Measure.Along };
+        { Symbol = "ℓ", Measure = Measure.Along };
     internal static readonly FamilyFigure Overlap =
         new("least-overlap", Quantity.Size, true, "least overlap of the fingers, along them, at the coldest")
-            { Symbol = "v_min", JudgedBy = Column.GapStrength };
+        { Symbol = "v_min", JudgedBy = Column.GapStrength };
     internal static readonly FamilyFigure Clearance =
         new("least-clearance", Quantity.Opening, true, "least clearance from tip to opposite root, along the fingers, at the hottest")
-            { Symbol = "e_min", JudgedBy = Column.GapStrength };
+        { Symbol = "e_min", JudgedBy = Column.GapStrength };
     internal static readonly FamilyFigure Lateral =
         new("lateral-clearance", Quantity.Movement, false, "clear space beside a finger, for movement across the fingers")
-            { Symbol = "e_side", JudgedBy = Column.Racking };
+        { Symbol = "e_side", JudgedBy = Column.Racking };
 
     /// <inheritdoc/>
     public override string Word => "finger";

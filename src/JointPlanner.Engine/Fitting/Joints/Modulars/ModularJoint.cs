@@ -12,22 +12,22 @@ public sealed class ModularJoint : JointFamily
         new("centre-beam-width", Quantity.Size, true, "top width of one centre-beam, normal to the joint") { Symbol = "b" };
     internal static readonly FamilyFigure Least =
         new("least-cell-gap", Quantity.Opening, true, "least gap of one cell at the hottest")
-            { Symbol = "g_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "g_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure Greatest =
         new("greatest-cell-gap", Quantity.Opening, true, "greatest gap of one cell at the coldest")
-            { Symbol = "g_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "g_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure Movement =
         new("greatest-cell-movement", Quantity.Movement, false, "greatest movement of one cell, both ways together")
-            { Symbol = "m_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "m_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure Racking =
         new("racking-per-cell", Quantity.Movement, false, "greatest movement of one cell along the joint line")
-            { Symbol = "R_cell", JudgedBy = Column.Racking };
+        { Symbol = "R_cell", JudgedBy = Column.Racking };
     internal static readonly FamilyFigure LeastInstallation =
         new("least-installation-cell-gap", Quantity.Opening, false, "least gap of one cell at which a seal can be put in")
-            { Symbol = "g_i,min", Measure = Measure.Normal };
+        { Symbol = "g_i,min", Measure = Measure.Normal };
     internal static readonly FamilyFigure GreatestInstallation =
         new("greatest-installation-cell-gap", Quantity.Opening, false, "greatest gap of one cell at which a seal can be put in")
-            { Symbol = "g_i,max", Measure = Measure.Normal };
+        { Symbol = "g_i,max", Measure = Measure.Normal };
 
     /// <inheritdoc/>
     public override string Word => "modular";

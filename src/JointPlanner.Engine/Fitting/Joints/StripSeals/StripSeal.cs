@@ -8,13 +8,13 @@ public sealed class StripSeal : JointFamily
 {
     internal static readonly FamilyFigure Least =
         new("least-opening", Quantity.Opening, true, "least opening at the hottest")
-            { Symbol = "G_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "G_min", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure Greatest =
         new("greatest-opening", Quantity.Opening, true, "greatest opening at the coldest")
-            { Symbol = "G_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
+        { Symbol = "G_max", JudgedBy = Column.SealRange, Measure = Measure.Normal };
     internal static readonly FamilyFigure RackingShare =
         new("greatest-racking-share", Quantity.Ratio, false, "greatest movement along the joint line as a share of greatest less least opening")
-            { Symbol = "s_R", JudgedBy = Column.Racking };
+        { Symbol = "s_R", JudgedBy = Column.Racking };
 
     /// <inheritdoc/>
     public override string Word => "strip-seal";

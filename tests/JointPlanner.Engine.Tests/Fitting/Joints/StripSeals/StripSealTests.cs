@@ -128,7 +128,8 @@ public sealed class StripSealTests
         var demand = Demand(d, Joint(10, Degrees(skew)), [Thermal(d, 1e-3, -10, 30)]);
         var owner = Owner(Family("strip-seal", [("least-opening", 0.010)], ("only", figures))) with
         {
-            RackingIsTotalRange = rackingIsTotal, SettingRule = rule ?? new MidWindow(),
+            RackingIsTotalRange = rackingIsTotal,
+            SettingRule = rule ?? new MidWindow(),
         };
         return Fit(demand, owner, d, code: code).Families[0].Sizes.Single();
     }
