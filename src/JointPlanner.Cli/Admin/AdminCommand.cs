@@ -1,5 +1,6 @@
 using System.CommandLine;
 using JointPlanner.Archive;
+using JointPlanner.Archive.Chains;
 using JointPlanner.Archive.PostgreSql;
 using JointPlanner.Archive.Sqlite;
 
@@ -28,7 +29,27 @@ internal static class AdminCommand
                 return ExitCodes.FaultyInput;
             }
         });
-        return new Command("admin", "Administration of the database.") { migrate };
+        var verify = new Command("verify-archive", "Walks every hash chain of the archive; exit code 3 where one is broken.");
+        verify.SetAction((parsed, cancellation) => Walk(parsed.InvocationConfiguration, cancellation));
+        return new Command("admin", "Administration of the database.") { migrate, verify };
+    }
+
+    private static async Task<int> Walk(InvocationConfiguration console, CancellationToken cancellation)
+    {
+        try
+        {
+            await using var archive = Open();
+            var walk = await ArchiveChain.Verify(archive, cancellation);
+            await console.Output.WriteLineAsync(walk.FirstBreak is { } broken
+                ? FormattableString.Invariant($"Broken: chain {broken.Chain}, position {broken.Position}, {broken.Row}. {broken.What}")
+                : FormattableString.Invariant($"Whole: {walk.Rows} rows, each with its predecessor's hash."));
+            return walk.Whole ? ExitCodes.Done : ExitCodes.CannotBeIssued;
+        }
+        catch (ArchiveNotReady refused)
+        {
+            await console.Error.WriteLineAsync(refused.Message);
+            return ExitCodes.FaultyInput;
+        }
     }
 
     private static ArchiveDatabase Open() => Setting("Archive__Kind") switch

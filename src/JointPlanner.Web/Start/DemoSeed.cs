@@ -32,8 +32,12 @@ internal static class DemoSeed
             if (!made.Succeeded) throw new ArchiveNotReady($"The demo person {account} could not be made: {string.Join(' ', made.Errors.Select(e => e.Description))}");
         }
 
-        await DemoHouse.Furnish(scope.ServiceProvider, await Ids(people));
+        var ids = await Ids(people);
+        await DemoHouse.Furnish(scope.ServiceProvider, ids);
         foreach (var (account, _, _) in People) Console.WriteLine($"  demo person  {account,-12} password  {passwords[account]}");
+        await DemoKeys.Cut(scope.ServiceProvider, Path.GetDirectoryName(file)!, ids.Single(p => p.Role is null).Id,
+            People.Zip(ids).Where(p => p.First.Role is Role.Designer or Role.Checker)
+                .Select(p => (p.First.Account, p.Second.Id, p.First.Name, passwords[p.First.Account])));
     }
 
     private static async Task<IReadOnlyList<(Guid Id, Role? Role)>> Ids(UserManager<Person> people)
