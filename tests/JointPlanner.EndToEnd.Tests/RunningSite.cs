@@ -53,6 +53,10 @@ public sealed class RunningSite : WebApplicationFactory<Program>, IAsyncLifetime
         builder.UseSetting("Archive:Folder", folder);
     }
 
-    private string Password(string account) =>
+    /// <summary>Key file of a demo signer; its password is the person's.</summary>
+    public string KeyFile(string account) => Path.Combine(folder, $"demo-{account}.pfx");
+
+    /// <summary>Password of a demo person.</summary>
+    public string Password(string account) =>
         JsonSerializer.Deserialize<Dictionary<string, string>>(File.ReadAllText(Path.Combine(folder, "demo-people.json")))![account];
 }
