@@ -15,7 +15,7 @@ internal static class MemoryValues
         var tables = steps.Select(s => s.Origin).OfType<TableOrigin>().Select(o => o.Source);
         var entries = counting.Entries.Where(e => causes.Contains(e.Key.Item1)).Select(e => e.Value.Source).OfType<Provenance>();
         var limits = joints.SelectMany(j => j.Fit?.Chosen?.Limits ?? []).Select(l => l.Source);
-        var owners = rules is null ? [] : rules.Families.Select(f => f.Source).Append(rules.Source);
+        var owners = rules is null ? [] : rules.Families.SelectMany(Sources).Append(rules.Source);
         return
         [
             .. tables.Concat(entries).Concat(limits).Concat(owners)
@@ -24,4 +24,8 @@ internal static class MemoryValues
                 .OrderBy(p => p.ValueId, StringComparer.Ordinal),
         ];
     }
+
+    /// <summary>A family's own source and those of single figures: a size that fits rests on every figure that it was judged by.</summary>
+    private static IEnumerable<Provenance> Sources(FamilyRules family) =>
+        family.Notes.Values.Select(n => n.Source).OfType<Provenance>().Prepend(family.Source);
 }

@@ -51,6 +51,21 @@ public sealed class CalculationTests
     }
 
     [Fact]
+    public void A_single_figure_held_from_memory_stands_before_issue_even_where_the_rest_of_its_rule_set_was_seen()
+    {
+        const string Noted = """
+            "notes": { "greatest-racking-share": { "source": { "mark": "memory", "document": "a manual", "edition": "", "place": "9.9", "value-id": "test/racking" } } },
+            "size-series": {
+            """;
+        var shelf = SeedData.ShelfWith("wsdot-compression-seal", t => t.Replace("\"size-series\": {", Noted, StringComparison.Ordinal));
+        Assert.DoesNotContain(MemoryIds(SeedData.Shelf), id => id == "test/racking");
+        Assert.Contains(MemoryIds(shelf), id => id == "test/racking");
+
+        static IEnumerable<string> MemoryIds(OwnerRuleShelf rules) =>
+            Calculation.Of(SeedData.Published("compression-seal-200-ft"), rules).Result!.MemoryValues.Select(v => v.ValueId);
+    }
+
+    [Fact]
     public void A_plan_whose_basis_is_silent_on_temperatures_cannot_be_frozen()
     {
         var document = SeedData.Structure("sorrel-creek-crossing").With("basis/code", "own").Without("basis/profile").Without("basis/setting-doubt").Without("basis/safety");
