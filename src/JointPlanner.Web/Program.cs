@@ -49,7 +49,7 @@ app.UseAuthorization();
 app.UseAntiforgery();
 app.MapStaticAssets();
 app.MapHealthChecks("/health");
-app.MapLeaving();
+app.MapAccounts();
 app.MapSheets();
 app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
 try

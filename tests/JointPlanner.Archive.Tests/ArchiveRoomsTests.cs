@@ -28,7 +28,7 @@ public class ArchiveRoomsTests
         Assert.True(made.Succeeded, string.Join(" ", made.Errors.Select(error => error.Description)));
 
         var organisations = scope.ServiceProvider.GetRequiredService<OrganisationRegister>();
-        await organisations.Create(new ActCall(Guid.CreateVersion7(), person.Id, "console"), "Roads Board of Northmark");
+        await organisations.Create(ActCall.AtConsole(person.Id, TimeProvider.System.GetUtcNow()), "Roads Board of Northmark");
         foreach (var act in (Type[])
                  [
                      typeof(BeginRevision), typeof(FreezeRevision), typeof(ReturnRevision), typeof(AcceptRevision), typeof(SignRevision), typeof(IssueRevision),

@@ -13,7 +13,7 @@ public sealed class IssueJourneyTests(RunningSite site) : IClassFixture<RunningS
     {
         var owner = await site.Visit("owner");
         await owner.Open(Structure);
-        await ConfirmAll(owner.Page);
+        await ConfirmAll(owner);
 
         var designer = await site.Visit("designer");
         await designer.Open(Structure);
@@ -28,13 +28,12 @@ public sealed class IssueJourneyTests(RunningSite site) : IClassFixture<RunningS
         await State(checker.Page, "checked");
 
         await designer.Go(revision);
-        await Sign(designer.Page, "designer");
+        await Sign(designer, "designer");
         await checker.Go(revision);
-        await Sign(checker.Page, "checker");
+        await Sign(checker, "checker");
 
         await owner.Go(revision);
-        await owner.Page.ClickAsync("button:has-text('Issue')");
-        await State(owner.Page, "issued");
+        await owner.Gravely(() => owner.Page.ClickAsync("button:has-text('Issue')"), owner.Page.Locator("h1 .state-issued"));
 
         var download = await owner.Page.Context.APIRequest.GetAsync($"{site.Address}{revision}/sheet.pdf");
         var report = new Verifier([]).Verify(await download.BodyAsync());
@@ -43,20 +42,23 @@ public sealed class IssueJourneyTests(RunningSite site) : IClassFixture<RunningS
         Assert.Empty(owner.Troubles.Concat(designer.Troubles).Concat(checker.Troubles));
     }
 
-    private static async Task ConfirmAll(IPage page)
+    private static async Task ConfirmAll(Visitor owner)
     {
+        var page = owner.Page;
         var open = page.Locator("li.finding-stops details.more");
         await Assertions.Expect(open.First).ToBeAttachedAsync();
         for (var left = await open.CountAsync(); left > 0; left--)
         {
             await open.First.Locator("summary").ClickAsync();
-            await open.First.Locator("button").ClickAsync();
+            await owner.Gravely(() => open.First.Locator("button").ClickAsync(), page.GetByText($"{left - 1} of"));
             await Assertions.Expect(open).ToHaveCountAsync(left - 1);
         }
     }
 
-    private async Task Sign(IPage page, string account)
+    private async Task Sign(Visitor signer, string account)
     {
+        var page = signer.Page;
+        await signer.Gravely(null, page.Locator("details.more summary"));
         await page.ClickAsync("details.more summary");
         await page.SetInputFilesAsync("#key", site.KeyFile(account));
         await page.FillAsync("#word", site.Password(account));

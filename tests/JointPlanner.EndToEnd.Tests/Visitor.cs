@@ -9,6 +9,7 @@ public sealed class Visitor
 {
     private readonly string address;
     private readonly List<string> troubles = [];
+    private string ownPassword = "";
 
     public Visitor(IPage page, string address)
     {
@@ -35,11 +36,29 @@ public sealed class Visitor
 
     public async Task Enter(string account, string password)
     {
+        ownPassword = password;
         await Go("/account/enter");
         await Page.FillAsync("#account", account);
         await Page.FillAsync("#password", password);
         await Page.ClickAsync("main button[type=submit]");
         await Page.WaitForSelectorAsync("[data-interactive=true]");
+    }
+
+    /// <summary>Does something grave (confirm, sign, issue, withdraw, give roles): the password is typed once more where the page asks for it.</summary>
+    /// <param name="press">The press; null where the page asks before there is anything to press.</param>
+    /// <param name="done">What is to be seen when it is done.</param>
+    public async Task Gravely(Func<Task>? press, ILocator done)
+    {
+        if (press is not null) await press();
+        var asked = Page.Locator("form[data-again]");
+        await Assertions.Expect(asked.Or(done).First).ToBeVisibleAsync();
+        if (await asked.CountAsync() > 0)
+        {
+            await asked.Locator("input[type=password]").FillAsync(ownPassword);
+            await asked.Locator("button[type=submit]").ClickAsync();
+        }
+
+        await Assertions.Expect(done).ToBeVisibleAsync();
     }
 
     /// <summary>Opens a demo structure from the list.</summary>

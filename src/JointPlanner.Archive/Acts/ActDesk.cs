@@ -17,7 +17,11 @@ public sealed class ActDesk(IDbContextFactory<ArchiveContext> archive, TimeProvi
     {
         try
         {
-            return await InOneTransaction(call.RequestId, call.PersonId, call.From, act, subject, does, cancel);
+            return await InOneTransaction(call.RequestId, call.PersonId, call.From, act, subject, (run, stop) =>
+            {
+                PasswordAgain.Need(act, call, run.Now);
+                return does(run, stop);
+            }, cancel);
         }
         catch (ActRefused refused) when (refused.Reason == RefusalReason.Altered)
         {

@@ -3,6 +3,7 @@ namespace JointPlanner.Archive.Acts;
 public enum RefusalReason
 {
     NotYourAct,
+    PasswordNeeded,
     WrongState,
     DraftExists,
     PlanFaults,

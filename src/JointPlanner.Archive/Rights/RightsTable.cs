@@ -49,6 +49,13 @@ public static class RightsTable
     /// <summary>Acts that everybody may do for themselves.</summary>
     public static readonly IReadOnlyList<Act> OfOneself = [Act.RegisterCertificate];
 
+    /// <summary>Acts for which the password is typed again, whoever does them.</summary>
+    public static readonly IReadOnlyList<Act> PasswordAgain =
+    [
+        Act.Sign, Act.Issue, Act.Withdraw, Act.GiveAccess, Act.ConfirmValue, Act.RevokeConfirmation, Act.SetRule,
+        Act.ManageAccounts, Act.ManageOrganisations, Act.ConfirmCertificate, Act.ManageRoots, Act.ManageSeal, Act.ManageTimeStamp, Act.ManagePublicAddress,
+    ];
+
     /// <summary>Acts that nobody does by themselves: they follow from another act.</summary>
     public static readonly IReadOnlyList<Act> Following = [Act.Supersede];
 
@@ -57,13 +64,15 @@ public static class RightsTable
     /// <summary>The table as it stands in DEVELOPERS.md.</summary>
     public static string Printed()
     {
-        var text = new StringBuilder("| act | role | own structures | other's, opened in this role |\n|---|---|---|---|\n");
+        var text = new StringBuilder("| act | role | own structures | other's, opened in this role | password again |\n|---|---|---|---|---|\n");
         foreach (var row in Rows)
-            text.Append(CultureInfo.InvariantCulture, $"| {row.Act} | {row.Role} | {Word(row.Own)} | {Word(row.Other)} |\n");
-        foreach (var act in OfAdministrator) text.Append(CultureInfo.InvariantCulture, $"| {act} | administrator | whole installation | |\n");
-        foreach (var act in OfOneself) text.Append(CultureInfo.InvariantCulture, $"| {act} | everybody | for themselves | |\n");
+            text.Append(CultureInfo.InvariantCulture, $"| {row.Act} | {row.Role} | {Word(row.Own)} | {Word(row.Other)} | {Again(row.Act)} |\n");
+        foreach (var act in OfAdministrator) text.Append(CultureInfo.InvariantCulture, $"| {act} | administrator | whole installation | | {Again(act)} |\n");
+        foreach (var act in OfOneself) text.Append(CultureInfo.InvariantCulture, $"| {act} | everybody | for themselves | | {Again(act)} |\n");
         return text.ToString();
     }
+
+    private static string Again(Act act) => Word(PasswordAgain.Contains(act));
 
     private static string Word(bool may) => may ? "yes" : "no";
 

@@ -3,6 +3,7 @@ using JointPlanner.Archive;
 using JointPlanner.Archive.People;
 using JointPlanner.Archive.PostgreSql;
 using JointPlanner.Archive.Sqlite;
+using JointPlanner.Web.Rooms.Accounts;
 using Microsoft.AspNetCore.Components.Authorization;
 using Microsoft.AspNetCore.DataProtection;
 using Microsoft.AspNetCore.Identity;
@@ -18,6 +19,8 @@ internal static class ArchiveSetup
         var (services, configuration) = (builder.Services, builder.Configuration);
         services.AddArchive(Open(configuration, builder.Environment));
         services.AddScoped<Shared.Caller>();
+        services.AddSingleton<PasswordMark>();
+        services.AddScoped<Door>();
 
         var keys = services.AddDataProtection().SetApplicationName("joint-planner").PersistKeysToDbContext<ArchiveContext>();
         if (configuration["Keys:Certificate"] is { Length: > 0 } certificate)
@@ -28,7 +31,11 @@ internal static class ArchiveSetup
         services.AddAuthentication(IdentityConstants.ApplicationScheme).AddIdentityCookies();
         services.AddAuthorization();
         services.AddScoped<AuthenticationStateProvider, StillWelcome>();
-        services.Configure<SecurityStampValidatorOptions>(options => options.ValidationInterval = TimeSpan.FromMinutes(2));
+        services.Configure<SecurityStampValidatorOptions>(options =>
+        {
+            options.ValidationInterval = TimeSpan.FromMinutes(2);
+            options.OnRefreshingPrincipal = PasswordMark.Keep;
+        });
         services.ConfigureApplicationCookie(cookie =>
         {
             cookie.LoginPath = "/account/enter";

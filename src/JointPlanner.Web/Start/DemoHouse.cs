@@ -34,5 +34,5 @@ internal static class DemoHouse
         }
     }
 
-    private static ActCall By(Guid person) => new(Guid.CreateVersion7(), person, "console");
+    private static ActCall By(Guid person) => ActCall.AtConsole(person, TimeProvider.System.GetUtcNow());
 }

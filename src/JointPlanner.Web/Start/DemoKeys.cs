@@ -38,5 +38,5 @@ internal static class DemoKeys
         if (!OperatingSystem.IsWindows()) File.SetUnixFileMode(file, UnixFileMode.UserRead | UnixFileMode.UserWrite);
     }
 
-    private static ActCall By(Guid person) => new(Guid.CreateVersion7(), person, "console");
+    private static ActCall By(Guid person) => ActCall.AtConsole(person, TimeProvider.System.GetUtcNow());
 }

@@ -25,3 +25,23 @@ document.addEventListener('keydown', event => {
   event.preventDefault();
   button.click();
 });
+// The password once more: a plain request, so that its answer can set the cookie; the page and what stands on it stay.
+document.addEventListener('submit', async event => {
+  const form = event.target.closest?.('form[data-again]');
+  if (!form) return;
+  event.preventDefault();
+  const answer = form.querySelector('[data-answer]');
+  const button = form.querySelector('button[type=submit]');
+  button.disabled = true;
+  try {
+    const response = await fetch(form.action, { method: 'POST', body: new FormData(form), redirect: 'error' });
+    const says = await response.text();
+    answer.value = response.ok ? `+${says}` : response.status === 429 ? '-Too many tries from this address. Wait a minute, then type it again.'
+      : says.length < 300 && !says.startsWith('<') ? `-${says}` : '-The server did not take it. Load the page again if it stays so.';
+  } catch {
+    answer.value = '-There was no answer. Look whether you are still connected and signed in, then type it again.';
+  }
+  form.querySelector('[type=password]').value = '';
+  button.disabled = false;
+  answer.dispatchEvent(new Event('change', { bubbles: true }));
+});

@@ -1,4 +1,8 @@
 using JointPlanner.Archive.Acts;
+using JointPlanner.Archive.Confirming;
+using JointPlanner.Archive.People;
+using JointPlanner.Archive.Revisions;
+using JointPlanner.Archive.Rights;
 using JointPlanner.Archive.Tests.Databases;
 using Microsoft.EntityFrameworkCore;
 
@@ -85,6 +89,43 @@ public class ActDeskTests
         Assert.Equal(state.Hash, entry.HashAfter);
         Assert.NotEqual(entry.HashBefore, entry.HashAfter);
         Assert.Equal(world.StructureId, entry.StructureId);
+    }
+
+    [Theory, BothDatabases]
+    public async Task A_grave_act_is_refused_without_the_password_of_the_last_five_minutes(Kind kind)
+    {
+        await using var world = await World.Make(kind);
+        var rule = new OwnerRule(IssuedBy.Owner, true, true);
+        foreach (var given in (DateTimeOffset?[])[null, world.Clock.Now.AddMinutes(-5).AddSeconds(-1), world.Clock.Now.AddMinutes(2)])
+            await Journey.Refused(RefusalReason.PasswordNeeded, () => world.Organisations.SetRule(world.By(world.Mara) with { PasswordAt = given }, world.Owner.Id, rule));
+        await world.Organisations.SetRule(world.By(world.Mara) with { PasswordAt = world.Clock.Now.AddMinutes(-5) }, world.Owner.Id, rule);
+    }
+
+    /// <summary>Walks every grave act; each is called by somebody who may do it, so that only the password stands in the way.</summary>
+    [Theory, BothDatabases]
+    public async Task No_grave_act_is_done_without_the_password_again(Kind kind)
+    {
+        await using var world = await FullArchive.Make(kind);
+        await using var scope = await world.As(world.Mara);
+        var issued = await scope.Revisions().Where(row => row.States.Any(state => state.State == RevisionState.Issued)).Select(row => row.Id).SingleAsync();
+        ActCall Bare(Person person) => world.By(person) with { PasswordAt = null };
+        var acts = new Dictionary<Act, Func<Task>>
+        {
+            [Act.Sign] = () => world.Sign.Do(Bare(world.Ines), new SignRequest(issued, SignatureField.Designer, "", [1], new SignatureFacts("", "", []))),
+            [Act.Issue] = () => world.Issue.Do(Bare(world.Mara), new IssueRequest(issued, world.IssueFacts(""))),
+            [Act.Withdraw] = () => world.Withdraw.Do(Bare(world.Mara), new WithdrawRequest(issued, "x")),
+            [Act.GiveAccess] = () => world.Structures.GiveAccess(Bare(world.Mara), world.StructureId, world.Elsewhere.Id, [Role.Designer]),
+            [Act.ConfirmValue] = () => world.Confirmations.Confirm(Bare(world.Mara), new ConfirmRequest(world.Owner.Id, "v", "d", "e", "p", new DateOnly(2031, 1, 1))),
+            [Act.RevokeConfirmation] = () => world.Confirmations.Revoke(Bare(world.Mara), Guid.CreateVersion7(), "x"),
+            [Act.SetRule] = () => world.Organisations.SetRule(Bare(world.Mara), world.Owner.Id, new OwnerRule(IssuedBy.Owner, true, true)),
+            [Act.ManageAccounts] = () => world.Organisations.SetActive(Bare(world.Ada), world.Kim.Id, active: false),
+            [Act.ManageOrganisations] = () => world.Organisations.SetRoles(Bare(world.Ada), world.Owner.Id, world.Kim.Id, [Role.Designer]),
+            [Act.ConfirmCertificate] = () => world.Certificates.Confirm(Bare(world.Ada), Guid.CreateVersion7(), "x"),
+        };
+        foreach (var act in acts.Values) await Journey.Refused(RefusalReason.PasswordNeeded, act);
+
+        // Acts of the installation that no room offers yet.
+        Assert.Equal([Act.ManagePublicAddress, Act.ManageRoots, Act.ManageSeal, Act.ManageTimeStamp], RightsTable.PasswordAgain.Except(acts.Keys).OrderBy(act => act.ToString(), StringComparer.Ordinal));
     }
 
     private static async Task<int> AuditCount(World world)

@@ -81,7 +81,7 @@ public sealed class World : IAsyncDisposable
 
     public string From { get; init; } = "test";
 
-    public ActCall By(Person person) => new(Guid.CreateVersion7(), person.Id, From);
+    public ActCall By(Person person) => new(Guid.CreateVersion7(), person.Id, From) { PasswordAt = Clock.Now };
 
     public Task<ArchiveScope> As(Person person) => ArchiveScope.Enter(Archive, person.Id);
 

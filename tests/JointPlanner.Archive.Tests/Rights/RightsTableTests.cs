@@ -34,7 +34,7 @@ public class RightsTableTests
     {
         var lines = RightsTable.Printed().Split('\n', StringSplitOptions.RemoveEmptyEntries);
         Assert.Equal(2 + RightsTable.Rows.Count + RightsTable.OfAdministrator.Count + RightsTable.OfOneself.Count, lines.Length);
-        Assert.Contains("| Issue | Owner | yes | no |", lines);
+        Assert.Contains("| Issue | Owner | yes | no | yes |", lines);
     }
 
     /// <summary>Each role × act on an own structure, on one opened in that role, on one opened in another role, and on a foreign one; by query and by question.</summary>

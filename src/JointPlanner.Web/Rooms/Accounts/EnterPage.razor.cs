@@ -1,7 +1,5 @@
-using JointPlanner.Archive.People;
 using JointPlanner.Web.Start;
 using Microsoft.AspNetCore.Components;
-using Microsoft.AspNetCore.Identity;
 
 namespace JointPlanner.Web.Rooms.Accounts;
 
@@ -19,10 +17,7 @@ public sealed partial class EnterPage
     public string? Back { get; set; }
 
     [Inject]
-    private SignInManager<Person> SignIns { get; set; } = null!;
-
-    [Inject]
-    private UserManager<Person> People { get; set; } = null!;
+    private Door Door { get; set; } = null!;
 
     [Inject]
     private NavigationManager Navigation { get; set; } = null!;
@@ -30,16 +25,16 @@ public sealed partial class EnterPage
     [Inject]
     private DemoMode Demo { get; set; } = null!;
 
+    [CascadingParameter]
+    private HttpContext Context { get; set; } = null!;
+
     /// <inheritdoc/>
     protected override void OnInitialized() => Entry ??= new();
 
     private async Task SignIn()
     {
         var typed = Entry!;
-        var person = await People.FindByNameAsync(typed.Account.Trim());
-        var answer = person is { Active: true }
-            ? await SignIns.PasswordSignInAsync(person, typed.Password, isPersistent: false, lockoutOnFailure: true)
-            : SignInResult.Failed;
+        var answer = await Door.Enter(typed.Account, typed.Password, AccountRoutes.From(Context));
         if (answer.Succeeded)
         {
             Navigation.NavigateTo(IsOurs(Back) ? Back![1..] : "", forceLoad: true);

@@ -14,6 +14,7 @@ public sealed partial class RevisionPage
     private Guid request = Guid.CreateVersion7();
     private string says = "", remark = "";
     private bool isMissing, isWorking;
+    private EventCallback waiting;
 
     /// <summary>Id of the revision.</summary>
     [Parameter]
@@ -70,12 +71,16 @@ public sealed partial class RevisionPage
 
     private async Task Do(Func<ActCall, Task> act)
     {
-        (isWorking, says) = (true, "");
+        (isWorking, says, waiting) = (true, "", default);
         try
         {
             // A second press while the first is under way carries the same id and gets the same answer.
             await act(await Caller.Now(request));
             remark = "";
+        }
+        catch (ActRefused refused) when (refused.Reason == RefusalReason.PasswordNeeded)
+        {
+            waiting = EventCallback.Factory.Create(this, () => Do(act));
         }
         catch (Exception refused) when (refused is ActRefused or NotFound or InvalidDataException)
         {

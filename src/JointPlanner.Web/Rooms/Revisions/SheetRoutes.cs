@@ -6,6 +6,7 @@ using JointPlanner.Archive.Revisions;
 using JointPlanner.Archive.Rights;
 using JointPlanner.Issuing;
 using JointPlanner.Pdf.Signing;
+using JointPlanner.Web.Rooms.Accounts;
 using JointPlanner.Web.Start;
 using Microsoft.AspNetCore.Mvc;
 using Microsoft.EntityFrameworkCore;
@@ -79,7 +80,7 @@ internal static class SheetRoutes
         if (PersonClaims.IdOf(context.User) is not { } person) return Results.Unauthorized();
         try
         {
-            await act(new ActCall(Guid.CreateVersion7(), person, context.Connection.RemoteIpAddress?.ToString() ?? "unknown"));
+            await act(new ActCall(Guid.CreateVersion7(), person, AccountRoutes.From(context)) { PasswordAt = PasswordMark.Of(context.User) });
             return Results.LocalRedirect($"/revisions/{id}");
         }
         catch (Exception refused) when (refused is ActRefused or NotFound or SigningRefusedException)

@@ -19,6 +19,7 @@ public sealed partial class MemoryPanel
     private Guid organisation;
     private bool mayConfirm;
     private string says = "";
+    private EventCallback waiting;
 
     /// <summary>Id of the structure.</summary>
     [Parameter, EditorRequired]
@@ -68,12 +69,16 @@ public sealed partial class MemoryPanel
     {
         try
         {
-            says = "";
+            (says, waiting) = ("", default);
             var call = await Caller.Now();
             var seen = Of(value);
             var today = DateOnly.FromDateTime(Clock.GetUtcNow().UtcDateTime);
             await Confirmations.Confirm(call, new ConfirmRequest(organisation, value.ValueId, seen.Document, seen.Edition, seen.Place, today, Demo.IsOn));
             await Read(call.PersonId);
+        }
+        catch (ActRefused refused) when (refused.Reason == RefusalReason.PasswordNeeded)
+        {
+            waiting = EventCallback.Factory.Create(this, () => Confirm(value));
         }
         catch (ActRefused refused)
         {
