@@ -40,6 +40,12 @@ public sealed class ListNode(ImmutableArray<DocumentNode> items) : DocumentNode
 {
     /// <summary>Its items in order.</summary>
     public ImmutableArray<DocumentNode> Items { get; } = items;
+
+    /// <summary>Addresses of the items by id, worked out once: a long list is asked for them at every look-up.</summary>
+    internal ItemAddresses ById => field ??= new ItemAddresses(this, itemsHaveIds: true);
+
+    /// <summary>Addresses of the items by number.</summary>
+    internal ItemAddresses ByNumber => field ??= new ItemAddresses(this, itemsHaveIds: false);
 }
 
 /// <summary>Named parts, in the order they were written.</summary>

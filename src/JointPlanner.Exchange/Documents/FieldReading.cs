@@ -79,7 +79,7 @@ public sealed class FieldReading
             Values.Miss(path);
         }
         if (list is null) return;
-        var addresses = ItemAddresses.Of(list, table.ItemsHaveIds(field.Pattern)).Select(a => $"{path}/{a}").ToArray();
+        var addresses = ItemAddresses.Of(list, table.ItemsHaveIds(field.Pattern)).InOrder.Select(a => $"{path}/{a}").ToArray();
         Values.PutItems(path, addresses);
         var itemPattern = $"{field.Pattern}/*";
         var leaf = table.Find(itemPattern);

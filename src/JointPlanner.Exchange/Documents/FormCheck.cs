@@ -75,8 +75,8 @@ public sealed class FormCheck
         }
         var itemPattern = $"{field.Pattern}/*";
         var hasIds = table.ItemsHaveIds(field.Pattern);
-        var addresses = ItemAddresses.Of(list, hasIds);
-        for (var i = 0; i < addresses.Length; i++)
+        var addresses = ItemAddresses.Of(list, hasIds).InOrder;
+        for (var i = 0; i < addresses.Count; i++)
         {
             var itemPath = $"{path}/{addresses[i]}";
             if (table.Find(itemPattern) is { } leaf) Part(leaf, itemPath, list.Items[i]);

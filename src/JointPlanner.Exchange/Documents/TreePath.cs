@@ -66,8 +66,8 @@ internal static class TreePath
                             yield return leaf;
                 break;
             case ListNode list:
-                var addresses = ItemAddresses.Of(list, table.ItemsHaveIds(pattern));
-                for (var i = 0; i < addresses.Length; i++)
+                var addresses = ItemAddresses.Of(list, table.ItemsHaveIds(pattern)).InOrder;
+                for (var i = 0; i < addresses.Count; i++)
                     foreach (var leaf in Leaves(table, $"{pattern}/*", $"{path}/{addresses[i]}", list.Items[i]))
                         yield return leaf;
                 break;
@@ -78,5 +78,5 @@ internal static class TreePath
     }
 
     private static int Place(FieldTable table, string pattern, ListNode list, string address) =>
-        Array.IndexOf(ItemAddresses.Of(list, table.ItemsHaveIds(pattern)), address);
+        ItemAddresses.Of(list, table.ItemsHaveIds(pattern)).Place(address);
 }

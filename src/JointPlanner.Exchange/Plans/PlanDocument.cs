@@ -52,7 +52,7 @@ public sealed class PlanDocument
     /// <summary>Addresses of a list's items in order: their ids, or #1 for items without one. Empty where there is no list.</summary>
     public IReadOnlyList<string> Items(string listPath) =>
         TreePath.Find(PlanFields.Table, Root, listPath) is ListNode list
-            ? ItemAddresses.Of(list, PlanFields.Table.ItemsHaveIds(PlanFields.Table.PatternOf(listPath)))
+            ? ItemAddresses.Of(list, PlanFields.Table.ItemsHaveIds(PlanFields.Table.PatternOf(listPath))).InOrder
             : [];
 
     /// <summary>Every text with its path, in the order they are written.</summary>
