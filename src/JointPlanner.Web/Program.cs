@@ -22,6 +22,7 @@ builder.Services.AddHealthChecks();
 builder.Services.AddHttpContextAccessor();
 builder.Services.AddCascadingAuthenticationState();
 builder.Services.AddScoped<Preferences>();
+builder.Services.AddScoped<JointPlanner.Web.Shared.Handout>();
 // Handed-in files stay in memory: nothing of them is written to a temporary folder.
 builder.Services.Configure<Microsoft.AspNetCore.Http.Features.FormOptions>(form => form.MemoryBufferThreshold = 26 << 20);
 builder.Services.AddSingleton(TrustedRoots.Open(ArchiveSetup.Folder(builder.Configuration, builder.Environment)));

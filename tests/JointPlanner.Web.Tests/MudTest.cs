@@ -10,6 +10,8 @@ public abstract class MudTest : BunitContext, IAsyncLifetime
 {
     protected MudTest()
     {
+        // Waiting ends with the change that is awaited; only a failure takes this long, on a busy machine too.
+        DefaultWaitTimeout = TimeSpan.FromSeconds(20);
         JSInterop.Mode = JSRuntimeMode.Loose;
         Services.AddMudServices(options => options.PopoverOptions.CheckForPopoverProvider = false);
         Services.AddScoped<Preferences>();

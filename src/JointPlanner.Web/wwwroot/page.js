@@ -1,5 +1,15 @@
-// The little that the server cannot do: remember two choices in this browser, and lead from a drawn thing to its column.
+// The little that the server cannot do: remember two choices in this browser, hand out a file or a copy, and lead from a drawn thing or a fault to its place.
 window.jointPlanner = {
+  save: (name, kind, text) => {
+    const link = document.createElement('a');
+    link.href = URL.createObjectURL(new Blob([text], { type: kind }));
+    link.download = name;
+    link.click();
+    setTimeout(() => URL.revokeObjectURL(link.href), 10000);
+  },
+  copy: async text => {
+    try { await navigator.clipboard.writeText(text); return true; } catch { return false; }
+  },
   remember: (name, value) => { document.cookie = `${name}=${value}; Path=/; Max-Age=31536000; SameSite=Lax`; },
   paper: value => { document.documentElement.dataset.theme = value; window.jointPlanner.remember('paper', value); },
 };
@@ -9,7 +19,18 @@ function follow(drawn) {
   column.scrollIntoView({ block: 'nearest', inline: 'center' });
   (column.querySelector('input, button, a') ?? column).focus();
 }
+function lead(path) {
+  const named = [path, path.slice(0, path.lastIndexOf('/'))].flatMap(p => [`[data-path="${CSS.escape(p)}"]:is(input, select, textarea)`, `[data-fault="${CSS.escape(p)}"]:not(li)`, `[data-column="${CSS.escape(p)}"]`]);
+  const place = named.map(n => document.querySelector(n)).find(p => p);
+  if (!place) return;
+  for (let around = place.parentElement; around; around = around.parentElement) if (around.tagName === 'DETAILS') around.open = true;
+  place.scrollIntoView({ block: 'center', inline: 'center' });
+  if (place.tabIndex < 0) place.tabIndex = -1;
+  place.focus();
+}
 document.addEventListener('click', event => {
+  const led = event.target.closest?.('[data-leads]');
+  if (led) { lead(led.dataset.leads); return; }
   const drawn = event.target.closest?.('.picture [data-path]');
   if (drawn) follow(drawn);
 });

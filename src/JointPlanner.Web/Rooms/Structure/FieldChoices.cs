@@ -14,6 +14,7 @@ internal static class FieldChoices
 
     private static IReadOnlyList<(string Word, string Name)>? Known(Field? field, Workbench bench) => field?.Entry switch
     {
+        FalseEntry => [("false", "not counted")],
         WordEntry words => [.. words.Words.Select(w => (w, w.Replace('-', ' ')))],
         ReferenceEntry reference => [.. reference.Lists.SelectMany(list => bench.Document.Items(list).Select(id => (id, Mark(bench, list, id))))],
         OutsideWordEntry { Of: "code" } => [.. (bench.Known.Bases ?? []).Select(b => (b.Id, b.Title))],

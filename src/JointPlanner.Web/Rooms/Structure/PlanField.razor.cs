@@ -38,9 +38,9 @@ public sealed partial class PlanField
 
     private string Placeholder => asked?.Default is { } standsIn ? $"{standsIn} (default)" : "";
 
-    private string EmptyChoice => asked?.Default is { } standsIn ? $"{standsIn} (default)" : IsRequired ? "choose" : "as the code says";
+    private string EmptyChoice => asked?.Default is { } standsIn ? $"{standsIn} (default)" : IsRequired ? "choose" : asked?.Entry is FalseEntry ? "by its factor" : "as the code says";
 
-    private string HintText => ShowHint && asked is { Hint.Length: > 0 } ? $"for instance {asked.Hint}" : "";
+    private string HintText => ShowHint && Text.Length == 0 && asked is { Hint.Length: > 0 } ? $"for instance {asked.Hint}" : "";
 
     private IReadOnlyList<Fault> Faults => [.. Bench.Outcome.Reading.At(Path)];
 

@@ -39,18 +39,35 @@ internal static class PlanParts
     }
 
     /// <summary>The plan without an item and without what only hangs on it.</summary>
-    internal static PlanDocument Without(PlanDocument plan, string path)
+    internal static PlanDocument Without(PlanDocument plan, string path) =>
+        GoesWith(plan, path).Aggregate(plan.Without(path), (changed, also) => changed.Without(also));
+
+    /// <summary>Paths of what has no sense without an item and goes with it: the bearing lines on a support or of a segment, the movements given for a joint.</summary>
+    internal static IReadOnlyList<string> GoesWith(PlanDocument plan, string path)
     {
-        var (list, id) = (path[..path.IndexOf('/', StringComparison.Ordinal)], path[(path.LastIndexOf('/') + 1)..]);
-        var changed = plan.Without(path);
-        if (list is "supports" or "segments")
-            foreach (var bearing in plan.Items("bearings").Where(b => plan.TextAt($"bearings/{b}/on") == id || plan.TextAt($"bearings/{b}/segment") == id))
-                changed = changed.Without($"bearings/{bearing}");
-        if (list == "joints")
-            foreach (var given in plan.Items("movements").Where(m => plan.TextAt($"movements/{m}/joint") == id))
-                changed = changed.Without($"movements/{given}");
-        return changed;
+        var (list, id) = Of(path);
+        return list switch
+        {
+            "supports" or "segments" => Naming(plan, "bearings", id, "on", "segment"),
+            "joints" => Naming(plan, "movements", id, "joint"),
+            _ => [],
+        };
     }
+
+    /// <summary>Paths of what stays though it names an item, and must then be told another: the joints at a support or segment.</summary>
+    internal static IReadOnlyList<string> MustBeToldAnother(PlanDocument plan, string path)
+    {
+        var (list, id) = Of(path);
+        return list is "supports" or "segments" ? Naming(plan, "joints", id, "near", "far") : [];
+    }
+
+    /// <summary>What a person calls an item: its mark, else its id.</summary>
+    internal static string Called(PlanDocument plan, string path) => plan.TextAt($"{path}/mark") is { Length: > 0 } mark ? mark : Of(path).Id;
+
+    private static (string List, string Id) Of(string path) => (path[..path.IndexOf('/', StringComparison.Ordinal)], path[(path.LastIndexOf('/') + 1)..]);
+
+    private static IReadOnlyList<string> Naming(PlanDocument plan, string list, string id, params string[] words) =>
+        [.. plan.Items(list).Select(item => $"{list}/{item}").Where(item => words.Any(word => plan.TextAt($"{item}/{word}") == id))];
 
     private static string? Last(PlanDocument plan, string list) => plan.Items(list) is [.., var last] ? last : null;
 }

@@ -3,6 +3,7 @@ using JointPlanner.Archive;
 using JointPlanner.Archive.Acts;
 using JointPlanner.Archive.Rights;
 using JointPlanner.Archive.Structures;
+using JointPlanner.Exchange.Plans;
 using JointPlanner.Web.Rooms.Structure;
 using JointPlanner.Web.Shared;
 using JointPlanner.Web.Shell;
@@ -66,15 +67,38 @@ public sealed partial class NewStructurePage
 
     private void Fix(string word) => beginning.FixedAt = int.Parse(word, CultureInfo.InvariantCulture);
 
-    private async Task Begin()
+    private Task Begin()
+    {
+        says = beginning.Name.Trim().Length == 0 ? "Name: it is empty. Give the structure a name."
+            : beginning.StationTexts.Count < 2
+                ? $"Stations of the supports: “{beginning.Stations}” names {beginning.StationTexts.Count}. Give at least two, each with its unit, separated by semicolons."
+                : "";
+        return says.Length > 0 ? Task.CompletedTask : Create(beginning.Name.Trim(), beginning.Zone, beginning.ToDocument());
+    }
+
+    private Task BeginWith(PlanFile file)
+    {
+        var plan = file.Document!;
+        var isZoneWrong = file.Faults.Any(f => f.Path == "structure/time-zone" && !f.IsWarning);
+        return Create(plan.TextAt("structure/name") ?? Path.GetFileNameWithoutExtension(file.Name), isZoneWrong ? beginning.Zone : plan.TextAt("structure/time-zone") ?? beginning.Zone, plan);
+    }
+
+    private async Task Create(string name, string zone, PlanDocument plan)
     {
         (isWorking, says) = (true, "");
         try
         {
-            if (beginning.Name.Trim().Length == 0) says = "Name: it is empty. Give the structure a name.";
-            else if (beginning.StationTexts.Count < 2)
-                says = $"Stations of the supports: “{beginning.Stations}” names {beginning.StationTexts.Count}. Give at least two, each with its unit, separated by semicolons.";
-            else await Create();
+            var call = await Caller.Now(request);
+            await using var scope = await ArchiveScope.Enter(Archive, call.PersonId);
+            foreach (var organisation in await scope.Organisations().OrderBy(o => o.Name).ToListAsync())
+            {
+                if (!await scope.MayIn(Act.CreateStructure, organisation.Id)) continue;
+                var made = await Register.Create(call, new CreateRequest(organisation.Id, name, zone, plan.ToJson()));
+                Navigation.NavigateTo($"structures/{made.StructureId}");
+                return;
+            }
+
+            says = "You may not begin structures in any organisation. Ask its owner for the role designer.";
         }
         catch (ActRefused refused)
         {
@@ -84,20 +108,5 @@ public sealed partial class NewStructurePage
         {
             isWorking = false;
         }
-    }
-
-    private async Task Create()
-    {
-        var call = await Caller.Now(request);
-        await using var scope = await ArchiveScope.Enter(Archive, call.PersonId);
-        foreach (var organisation in await scope.Organisations().OrderBy(o => o.Name).ToListAsync())
-        {
-            if (!await scope.MayIn(Act.CreateStructure, organisation.Id)) continue;
-            var made = await Register.Create(call, new CreateRequest(organisation.Id, beginning.Name.Trim(), beginning.Zone, beginning.ToDocument().ToJson()));
-            Navigation.NavigateTo($"structures/{made.StructureId}");
-            return;
-        }
-
-        says = "You may not begin structures in any organisation. Ask its owner for the role designer.";
     }
 }

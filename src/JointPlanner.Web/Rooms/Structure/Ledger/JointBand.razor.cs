@@ -22,13 +22,14 @@ public sealed partial class JointBand
             // The rows stay while a fault stands in the way, so that nothing jumps while typing.
             if (Bench.Result is { } result) causes = [.. result.Joints.SelectMany(j => j.Movements).Select(m => m.Cause).Distinct().Order()];
             shownCauses = areCausesShown ? causes : [];
-            return ["opens and closes by", .. shownCauses.Select(Words.Of), "joint that fits", "set opening", "skew", "set at", "deck age then", "between"];
+            return ["opens and closes by", .. shownCauses.Select(Words.Of), "joint that fits", "set opening", "skew", "set at", "deck age then", "uncertainties", "between", "mark on the drawing"];
         }
     }
 
     // Ages are asked for only where a deck at the joint shortens.
     private IEnumerable<string> Shortening(string path) => ((string[])["near", "far"]).Where(side =>
-        Bench.Document.TextAt($"{path}/{side}") is { } body && (Bench.Document.Has($"segments/{body}/creep") || Bench.Document.Has($"segments/{body}/shrinkage")));
+        Bench.Document.Has($"{path}/setting/{side}-deck-age")
+        || (Bench.Document.TextAt($"{path}/{side}") is { } body && (Bench.Document.Has($"segments/{body}/creep") || Bench.Document.Has($"segments/{body}/shrinkage"))));
 
     private Task Add() => Bench.Take(PlanParts.WithJoint(Bench.Document, Bench.UsedIds("joints")), "joints");
 }
