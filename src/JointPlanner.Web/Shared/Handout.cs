@@ -19,6 +19,6 @@ public sealed class Handout(IJSRuntime script)
             .Where(c => !char.IsControl(c) && char.GetUnicodeCategory(c) != System.Globalization.UnicodeCategory.NonSpacingMark)
             .Select(c => char.IsAsciiLetterOrDigit(c) ? c : '-');
         var name = string.Join('-', string.Concat(letters).Split('-', StringSplitOptions.RemoveEmptyEntries));
-        return name.Length == 0 ? otherwise : name[..Math.Min(name.Length, 60)];
+        return name.Length == 0 ? otherwise : name.Length > 60 ? name[..60] : name;
     }
 }
