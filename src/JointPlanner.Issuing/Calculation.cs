@@ -18,8 +18,8 @@ namespace JointPlanner.Issuing;
 /// </summary>
 public sealed record Calculation
 {
-    private Calculation(PlanReading reading, CodeBasis? basis, OwnerRulesReading? owner, Result? result) =>
-        (Reading, Basis, Owner, Result) = (reading, basis, owner, result);
+    private Calculation(PlanReading reading, CodeBasis? basis, OwnerRulesReading? owner, double settingStep, Result? result) =>
+        (Reading, Basis, Owner, SettingStep, Result) = (reading, basis, owner, settingStep, result);
 
     /// <summary>What the document says: faults, defaults, the plan.</summary>
     public PlanReading Reading { get; }
@@ -29,6 +29,9 @@ public sealed record Calculation
 
     /// <summary>The owner's rule set; null where the plan uses none.</summary>
     public OwnerRulesReading? Owner { get; }
+
+    /// <summary>Step to which set values are rounded where the owner's rules state none, m.</summary>
+    private double SettingStep { get; }
 
     /// <summary>What was computed; null where faults stand in the way.</summary>
     public Result? Result { get; }
@@ -41,10 +44,14 @@ public sealed record Calculation
     [
         .. Faults.Where(f => !f.IsWarning).Select(f => $"{f.Path}: {f.Wrong} {f.Remedy}"),
         .. (Result?.Findings ?? []).Where(f => f.Severity == Severity.Error).Select(f => $"{f.Path}: {FindingText.Of(f, Profile)}"),
+        .. TooManyRows(),
     ];
 
     /// <summary>The display profile that the plan asks for.</summary>
     public DisplayProfile Profile => ProfileOf(Reading.Document);
+
+    /// <summary>Most rows that the tables for the day of setting may have together, so that the results can be attached, signed and verified.</summary>
+    public const int MostDayRows = 60_000;
 
     /// <summary>Computes a document with the rule sets of an installation.</summary>
     /// <param name="document">The plan as it stands on the screen or in a file.</param>
@@ -78,13 +85,35 @@ public sealed record Calculation
         Confirmations = [.. confirmations.OrderBy(c => c.ValueId, StringComparer.Ordinal)],
     };
 
+    /// <summary>What is stored of this calculation, with the tables for the day of setting.</summary>
+    /// <param name="packageHash">SHA-256 of the package.</param>
+    /// <exception cref="InvalidOperationException">Nothing was computed.</exception>
+    public StoredResults Stored(string packageHash)
+    {
+        var result = Result ?? throw new InvalidOperationException("There are no results to store.");
+        if (EngineOwner is not { } owner) return ResultsFile.Of(result, ProgramVersion.Number, packageHash, null, []);
+        var day = new StoredDay(Profile.Id, owner.Rules.UseWithin,
+            [.. SettingDays.Methods(result.Plan, owner.Rules).Select(m => new StoredMethod(m.Id, m.Name, m.TemperatureUncertainty, m.Source))],
+            [.. result.Plan.SettingDay.Points.Select(p => new StoredPoint(p.Id, p.Name, p.Weight))]);
+        return ResultsFile.Of(result, ProgramVersion.Number, packageHash, day, SettingDays.Of(result, owner, Profile.DayStep));
+    }
+
+    private Owner? EngineOwner => Owner?.Rules is { } rules ? new Owner(rules, SettingStep) : null;
+
+    private IEnumerable<string> TooManyRows()
+    {
+        if (Result is not { } result || EngineOwner is not { } owner || SettingDays.RowCount(result, owner, Profile.DayStep) is not (> MostDayRows and var count)) yield break;
+        yield return FormattableString.Invariant(
+            $"setting-table/ages: the tables for the day of setting would have {count} rows. Allowed: up to {MostDayRows}. Tabulate fewer deck ages or methods of measuring.");
+    }
+
     private static Calculation Of(PlanReading reading, OwnerRulesReading? owner, double settingStep, CancellationToken cancellation)
     {
         var basis = Catalogue.Find(reading.Document?.TextAt("basis/code") ?? "");
         var result = reading.Plan is { } plan && basis is not null
             ? Movements.Of(plan, basis, owner?.Rules is { } rules ? new Owner(rules, settingStep) : null, cancellation)
             : null;
-        return new Calculation(reading, basis, owner, result);
+        return new Calculation(reading, basis, owner, settingStep, result);
     }
 
     private static DisplayProfile ProfileOf(PlanDocument? document) =>

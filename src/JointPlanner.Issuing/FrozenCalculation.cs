@@ -23,7 +23,7 @@ public sealed record FrozenCalculation(byte[] Package, byte[] Results, PdfFile S
         // Only what this calculation uses goes into its package: another confirmation must not change its hash.
         var used = result.MemoryValues.Select(v => v.ValueId).ToHashSet();
         var package = calculation.Package(confirmations.Where(c => used.Contains(c.ValueId))).ToUtf8();
-        var results = ResultsFile.ToUtf8(ResultsFile.Of(result, ProgramVersion.Number, ContentHash.Of(package)));
+        var results = ResultsFile.ToUtf8(calculation.Stored(ContentHash.Of(package)));
         var facts = new SheetFacts
         {
             Revision = title.Revision,

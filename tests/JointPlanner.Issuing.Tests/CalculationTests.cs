@@ -75,5 +75,5 @@ public sealed class CalculationTests
     }
 
     private static byte[] Results(Calculation calculation, byte[] package) =>
-        ResultsFile.ToUtf8(ResultsFile.Of(calculation.Result!, ProgramVersion.Number, ContentHash.Of(package)));
+        ResultsFile.ToUtf8(calculation.Stored(ContentHash.Of(package)));
 }

@@ -23,7 +23,7 @@ internal static class ResultJson
             ["code-revision"] = calculation.Basis.Revision,
             ["owner-rules"] = calculation.Owner?.Rules?.Id,
             ["can-be-issued"] = result.CanBeIssued,
-            ["results"] = JsonNode.Parse(ResultsFile.ToUtf8(ResultsFile.Of(result, ProgramVersion.Number, ContentHash.Of(package)))),
+            ["results"] = JsonNode.Parse(ResultsFile.ToUtf8(calculation.Stored(ContentHash.Of(package)))),
             ["findings"] = new JsonArray([
                 .. result.Findings.Select(f => new JsonObject
                 {

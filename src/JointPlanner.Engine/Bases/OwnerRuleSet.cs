@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Engine.Bases;
 
@@ -24,6 +25,10 @@ public sealed record OwnerRuleSet
     public double? RoundingStep { get; init; }
     /// <summary>How the set value is chosen within its window.</summary>
     public SettingRule SettingRule { get; init; } = new MidWindow();
+    /// <summary>Methods of measuring the temperature on the day; empty where the owner says nothing.</summary>
+    public ImmutableArray<MeasuringMethod> MeasuringMethods { get; init; } = [];
+    /// <summary>How long after its issue a calculation may be used to set joints, s.</summary>
+    public double UseWithin { get; init; } = 90 * Unit.Day.Factor;
     /// <summary>Joint families that the owner allows, in order of preference, with their sizes and limits.</summary>
     public ImmutableArray<FamilyRules> Families { get; init; } = [];
 }

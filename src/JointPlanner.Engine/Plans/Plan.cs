@@ -26,6 +26,8 @@ public sealed record Plan
     public ImmutableArray<GivenMovement> GivenMovements { get; init; } = [];
     /// <summary>What the setting table shall cover.</summary>
     public SettingTableRequest SettingTable { get; init; } = new();
+    /// <summary>How the temperature is found on the day of setting.</summary>
+    public SettingDay SettingDay { get; init; } = new();
     /// <summary>Fields that nobody gave, with the reason of the value that stands in: path → sentence.</summary>
     public ImmutableSortedDictionary<string, string> Defaults { get; init; } = ImmutableSortedDictionary<string, string>.Empty;
 

@@ -55,6 +55,10 @@ public static class OwnerRuleFields
         Maybe("setting-rule/temperature", "reference temperature", new QuantityEntry(Quantity.Temperature, new("-60 °C", "60 °C")), "Of a fixed reference."),
         Maybe("setting-rule/opening", "reference opening", new QuantityEntry(Quantity.Opening, new("0 mm", "5 m")), "Normal opening at the reference temperature; the family's own where nothing is given."),
 
+        new("use-within", "use within", new QuantityEntry(Quantity.Age, new("1 d", "3650 d")), "How long after its issue a calculation may be used to set joints.")
+            { Default = "90 d", DefaultReason = "our proposal, not published" },
+        .. PlanFields.Measuring("measuring-methods"),
+
         Maybe("families", "families", new ListEntry(0, 50, "family"), "Joint families that the owner allows, in order of preference."),
         Needed("families/*/family", "family", new WordEntry([.. JointFamilies.All.Select(f => f.Word)]), "Family of joint."),
         .. Source("families/*/source", isRequired: false),

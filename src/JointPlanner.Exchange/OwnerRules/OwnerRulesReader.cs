@@ -3,6 +3,7 @@ using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
 using JointPlanner.Exchange.Documents;
+using JointPlanner.Exchange.Plans;
 
 namespace JointPlanner.Exchange.OwnerRules;
 
@@ -48,6 +49,8 @@ public sealed class OwnerRulesReader
             UncertaintyFactor = values.Number("uncertainty-factor"),
             RoundingStep = values.NumberOrNone("rounding"),
             SettingRule = Rule(),
+            MeasuringMethods = values.Methods("measuring-methods"),
+            UseWithin = values.Number("use-within"),
             Families = Families(source),
         };
     }

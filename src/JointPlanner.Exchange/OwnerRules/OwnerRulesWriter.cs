@@ -24,6 +24,9 @@ public static class OwnerRulesWriter
             ("racking", Text(rules.RackingIsTotalRange ? "total-range" : "one-way")),
             ("uncertainty-factor", Number(rules.UncertaintyFactor)),
             ("setting-rule", Rule(rules.SettingRule, showsUs)),
+            ("use-within", Of(rules.UseWithin, Quantity.Age, showsUs)),
+            ("measuring-methods", new ListNode([.. rules.MeasuringMethods.Select(m => Map(("id", Text(m.Id)), ("name", Text(m.Name)),
+                ("temperature-uncertainty", Of(m.TemperatureUncertainty, Quantity.TemperatureDifference, showsUs)), ("source", Text(m.Source))))])),
             ("families", new ListNode([.. rules.Families.Select(f => Family(f, showsUs))])));
         return rules.RoundingStep is { } step ? document.With("rounding", Of(step, Quantity.Opening, showsUs)) : document;
     }

@@ -51,6 +51,19 @@ public static class PlanFields
         Needed($"segments/*/{word}/development/*/share", "share over", new RatioEntry(0, 1), "Share of the strain that is over by then, 0 to 1.", "0.4"),
     ];
 
+    /// <summary>Methods of measuring, in a plan or an owner's rule set.</summary>
+    internal static IEnumerable<Field> Measuring(string pattern) =>
+    [
+        Maybe(pattern, "methods of measuring", new ListEntry(0, 8, "method of measuring"),
+            "Ways in which the temperature of the structure may be measured on the day, each with its uncertainty; each gets a table of its own."),
+        Needed($"{pattern}/*/id", "id", new IdEntry(), "Short name in this file, fixed once issued."),
+        Needed($"{pattern}/*/name", "name of the method", new TextEntry(Name), "What people call it.", "contact thermometer on shaded surfaces"),
+        Needed($"{pattern}/*/temperature-uncertainty", "uncertainty of the temperature",
+            new QuantityEntry(Quantity.TemperatureDifference, new("0 K", "20 K")) { Usual = new("0.2 K", "8 K") },
+            "One standard deviation of the mean temperature so measured.", "2 K"),
+        Needed($"{pattern}/*/source", "source of the uncertainty", new TextEntry(Note), "Where the uncertainty comes from."),
+    ];
+
     /// <summary>The table.</summary>
     public static readonly FieldTable Table = new("joint-plan", 1,
     [
@@ -188,5 +201,14 @@ public static class PlanFields
             "5 K", "our proposal", "5 K"),
         Maybe("setting-table/ages", "deck ages of the table", new ListEntry(0, 20, "deck age"), "Further deck ages to tabulate."),
         new("setting-table/ages/*", "deck age of the table", Age, "A deck age to tabulate.") { Hint = "180 d" },
+
+        Group("setting-day", "day of setting", "How the temperature of the structure is found on the day of setting."),
+        .. Measuring("setting-day/methods"),
+        Maybe("setting-day/points", "points measured", new ListEntry(0, 8, "measuring point"),
+            "Points whose temperatures make the mean temperature; one mean temperature, found by the person, where nothing is given."),
+        Needed("setting-day/points/*/id", "id", new IdEntry(), "Short name in this file, fixed once issued."),
+        Needed("setting-day/points/*/name", "name of the point", new TextEntry(Name), "Where it lies.", "deck slab"),
+        Needed("setting-day/points/*/weight", "weight of the point", new RatioEntry(0.001, 1_000_000),
+            "Its weight in the mean: expansion × stiffness × area of the part that it stands for, on any scale.", "0.55"),
     ]);
 }

@@ -42,6 +42,7 @@ internal sealed class PlanMaking
                 Step = values.Number("setting-table/step"),
                 Ages = [.. values.Items("setting-table/ages").Select(values.Number)],
             },
+            SettingDay = SettingDay(),
             Defaults = values.Defaults.ToImmutableSortedDictionary(d => d.Key, d => d.Value.Reason, StringComparer.Ordinal),
         };
     }
@@ -70,6 +71,18 @@ internal sealed class PlanMaking
         EffectiveMin = values.NumberOrNone("climate/effective-min"),
         Warming = values.Number("climate/warming"),
     };
+
+    private SettingDay SettingDay()
+    {
+        const string methods = "setting-day/methods", points = "setting-day/points";
+        if (!document.Has(methods)) values.Default(methods, "the owner's", "no method of measuring is given: the owner's, else our proposal, not published");
+        if (!document.Has(points)) values.Default(points, "one", "no points are given: one mean temperature of the structure, found by the person on site");
+        return new SettingDay
+        {
+            Methods = values.Methods(methods),
+            Points = Items(points, (path, id) => new MeasuringPoint(id, values.Text($"{path}/name"), values.Number($"{path}/weight"))),
+        };
+    }
 
     private Support Support(string path, string id)
     {

@@ -12,8 +12,8 @@ public sealed class DisplayProfile
 {
     private readonly FrozenDictionary<Quantity, DisplayUnit> units;
 
-    private DisplayProfile(string id, string name, double settingStep, Dictionary<Quantity, DisplayUnit> units) =>
-        (Id, Name, SettingStep, this.units) = (id, name, settingStep, units.ToFrozenDictionary());
+    private DisplayProfile(string id, string name, double settingStep, double dayStep, Dictionary<Quantity, DisplayUnit> units) =>
+        (Id, Name, SettingStep, DayStep, this.units) = (id, name, settingStep, dayStep, units.ToFrozenDictionary());
 
     /// <summary>Word for the profile in files and on the command line.</summary>
     public string Id { get; }
@@ -24,13 +24,16 @@ public sealed class DisplayProfile
     /// <summary>Step to which set values are rounded where the owner's rules state none, m.</summary>
     public double SettingStep { get; }
 
+    /// <summary>Step of temperature between rows of the tables that people on site set by, K.</summary>
+    public double DayStep { get; }
+
     /// <summary>How a kind of quantity is shown.</summary>
     /// <exception cref="ArgumentException">The profile has no unit for it.</exception>
     public DisplayUnit this[Quantity quantity] =>
         units.TryGetValue(quantity, out var unit) ? unit : throw new ArgumentException($"The {Id} profile has no unit for {quantity.Id}.");
 
     /// <summary>Metres, millimetres, kilonewtons, degrees Celsius.</summary>
-    public static readonly DisplayProfile Metric = new("metric", "metric units", 0.001, new()
+    public static readonly DisplayProfile Metric = new("metric", "metric units", 0.001, 1, new()
     {
         [Quantity.Length] = new(Unit.Metre, Decimals(3)),
         [Quantity.Movement] = new(Unit.Millimetre, Decimals(1)),
@@ -57,7 +60,7 @@ public sealed class DisplayProfile
     });
 
     /// <summary>Feet in decimals for the deck, inches for gaps and movements, kips, degrees Fahrenheit.</summary>
-    public static readonly DisplayProfile Us = new("us", "US customary units", 0.0254 / 16, new()
+    public static readonly DisplayProfile Us = new("us", "US customary units", 0.0254 / 16, 2 * Unit.FahrenheitDifference.Factor, new()
     {
         [Quantity.Length] = new(Unit.Foot, Decimals(3)),
         [Quantity.Movement] = new(Unit.InchUnit, Decimals(3)),

@@ -20,6 +20,17 @@ public static class SetValueText
         return NumberText.WithUnit(si, Quantity.Opening, profile, style);
     }
 
+    /// <summary>The same without a decimal that is nil: "42 mm", for numbers that are read at arm's length.</summary>
+    /// <param name="si">Opening, m.</param>
+    /// <param name="profile">Profile of the reader.</param>
+    public static string Brief(double si, DisplayProfile profile)
+    {
+        var text = Of(si, profile);
+        var space = text.LastIndexOf(' ');
+        var (number, unit) = (text[..space], text[space..]);
+        return number.Contains('.', StringComparison.Ordinal) ? number.TrimEnd('0').TrimEnd('.') + unit : text;
+    }
+
     /// <summary>Inches as whole number and fraction in lowest terms; null where no thirty-second fits.</summary>
     public static string? Fraction(double inches)
     {

@@ -85,7 +85,7 @@ public sealed class PlanReaderTests
             [
                 "bearings/b1/setting/temperature", "bearings/b1/station", "bearings/b2/setting/temperature", "bearings/b2/station", "climate/warming", "display",
                 "joints/j1/setting/measure-uncertainty", "joints/j1/setting/remaining-uncertainty", "joints/j1/setting/temperature-uncertainty", "joints/j1/skew",
-                "segments/s1/axial-stiffness", "segments/s1/depth", "setting-table/step", "structure/time-zone", "supports/a1/stiffness", "supports/a2/stiffness",
+                "segments/s1/axial-stiffness", "segments/s1/depth", "setting-day/methods", "setting-day/points", "setting-table/step", "structure/time-zone", "supports/a1/stiffness", "supports/a2/stiffness",
             ], defaults.Keys.Order(StringComparer.Ordinal));
         Assert.Equal(("1 m", "100 GN", "20 m", "2 K"), (defaults["segments/s1/depth"], defaults["segments/s1/axial-stiffness"], defaults["bearings/b2/station"], defaults["joints/j1/setting/temperature-uncertainty"]));
         Assert.All(reading.Defaults, d => Assert.NotEmpty(d.Reason));
