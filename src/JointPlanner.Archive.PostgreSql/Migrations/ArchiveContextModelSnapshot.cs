@@ -1037,6 +1037,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
                         .IsRequired()
                         .HasColumnType("text");
 
+                    b.Property<double?>("DeckAge")
+                        .HasColumnType("double precision");
+
                     b.Property<string>("Device")
                         .IsRequired()
                         .HasColumnType("text");
@@ -1087,6 +1090,9 @@ namespace JointPlanner.Archive.PostgreSql.Migrations
 
                     b.Property<Guid>("StructureId")
                         .HasColumnType("uuid");
+
+                    b.Property<string>("TemperaturesRead")
+                        .HasColumnType("text");
 
                     b.Property<string>("VerdictAtMaximum")
                         .IsRequired()

@@ -1032,6 +1032,9 @@ namespace JointPlanner.Archive.Sqlite.Migrations
                         .IsRequired()
                         .HasColumnType("TEXT");
 
+                    b.Property<double?>("DeckAge")
+                        .HasColumnType("REAL");
+
                     b.Property<string>("Device")
                         .IsRequired()
                         .HasColumnType("TEXT");
@@ -1081,6 +1084,9 @@ namespace JointPlanner.Archive.Sqlite.Migrations
                         .HasColumnType("TEXT");
 
                     b.Property<Guid>("StructureId")
+                        .HasColumnType("TEXT");
+
+                    b.Property<string>("TemperaturesRead")
                         .HasColumnType("TEXT");
 
                     b.Property<string>("VerdictAtMaximum")

@@ -14,9 +14,11 @@ public sealed record MeasuredPoint(string Place, double Opening, string Directio
 /// <summary>Whether the opening as set, carried to an end of the temperature range, still fits, and the sentence that says so.</summary>
 public sealed record EndVerdict(bool Holds, string Sentence);
 
+/// <param name="DeckAge">Seconds; null where it plays no part.</param>
+/// <param name="TemperaturesRead">What was read at each measuring point, in words.</param>
 public sealed record RecordRequest(
     Guid RevisionId, string Joint, string Device, DateTimeOffset MeasuredAt, string HoldPoint, IReadOnlyList<MeasuredPoint> Points,
-    EndVerdict AtMinimum, EndVerdict AtMaximum, string? Reason = null);
+    EndVerdict AtMinimum, EndVerdict AtMaximum, string? Reason = null, double? DeckAge = null, string? TemperaturesRead = null);
 
 public sealed record RecordAnswer(Guid RecordId, bool Holds);
 
@@ -79,6 +81,8 @@ public sealed class SettingBook(ActDesk desk, FieldLinks links)
             MeasuredAt = request.MeasuredAt,
             Zone = structure.Zone,
             HoldPoint = PlainText.Required("hold point", request.HoldPoint, PlainText.NameLimit),
+            DeckAge = request.DeckAge is { } age ? Within("deck age", age, 0, 200 * 365.25 * 86400, "s") : null,
+            TemperaturesRead = PlainText.Optional("temperatures read", request.TemperaturesRead, PlainText.NoteLimit),
             HoldsAtMinimum = request.AtMinimum.Holds,
             VerdictAtMinimum = PlainText.Required("verdict at the lowest temperature", request.AtMinimum.Sentence, PlainText.NoteLimit),
             HoldsAtMaximum = request.AtMaximum.Holds,

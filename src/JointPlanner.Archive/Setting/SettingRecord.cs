@@ -31,6 +31,12 @@ public sealed class SettingRecord : ChainedRow
     /// <summary>Stage or hold point by name ("before concreting").</summary>
     public required string HoldPoint { get; init; }
 
+    /// <summary>Age of the deck then, seconds; null where it plays no part.</summary>
+    public double? DeckAge { get; init; }
+
+    /// <summary>What was read at each measuring point, in words, from which the points' mean temperature comes; null where it was found otherwise.</summary>
+    public string? TemperaturesRead { get; init; }
+
     public required bool HoldsAtMinimum { get; init; }
     public required string VerdictAtMinimum { get; init; }
     public required bool HoldsAtMaximum { get; init; }
@@ -44,7 +50,7 @@ public sealed class SettingRecord : ChainedRow
     {
         text.Add("structure", StructureId).Add("joint", Joint).Add("device", Device).Add("revision", RevisionId)
             .Add("person", PersonId).Add("link", FieldLinkId).Add("name", PersonName).Add("measured", MeasuredAt).Add("zone", Zone)
-            .Add("holdPoint", HoldPoint).Add("holdsAtMinimum", HoldsAtMinimum).Add("verdictAtMinimum", VerdictAtMinimum)
+            .Add("holdPoint", HoldPoint).Add("deckAge", DeckAge).Add("temperaturesRead", TemperaturesRead).Add("holdsAtMinimum", HoldsAtMinimum).Add("verdictAtMinimum", VerdictAtMinimum)
             .Add("holdsAtMaximum", HoldsAtMaximum).Add("verdictAtMaximum", VerdictAtMaximum).Add("reason", Reason);
         foreach (var point in Points.OrderBy(point => point.Ordinal)) point.Write(text);
     }

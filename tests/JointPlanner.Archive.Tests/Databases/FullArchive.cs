@@ -17,7 +17,7 @@ public static class FullArchive
             new MeasuredPoint("left kerb", 0.0412, "normal to the joint", 11.5, "embedded", 1.0),
             new MeasuredPoint("right kerb", 0.0405, "normal to the joint", 11.5, "embedded", 1.0),
         ],
-        Fits, atMaximum ?? Fits);
+        Fits, atMaximum ?? Fits, DeckAge: 91 * 86400.0, TemperaturesRead: "deck slab 12.5 °C × 0.5; webs 10.5 °C × 0.5");
 
     public static async Task<World> Make(Kind kind) => await Fill(await World.Make(kind));
 

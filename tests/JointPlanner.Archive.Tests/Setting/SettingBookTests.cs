@@ -19,6 +19,7 @@ public class SettingBookTests
         Assert.Equal("Kim Sand", record.PersonName);
         Assert.Equal("Europe/Oslo", record.Zone);
         Assert.Equal(new DateTimeOffset(2031, 5, 4, 4, 10, 0, TimeSpan.Zero), record.MeasuredAt);
+        Assert.Equal((91 * 86400.0, "deck slab 12.5 °C × 0.5; webs 10.5 °C × 0.5"), (record.DeckAge, record.TemperaturesRead));
         Assert.Equal([0.0412, 0.0405], record.Points.OrderBy(point => point.Ordinal).Select(point => point.Opening));
         Assert.All(record.Points, point => Assert.Equal(("normal to the joint", 11.5, "embedded", 1.0), (point.Direction, point.Temperature, point.Method, point.Uncertainty)));
     }
@@ -79,6 +80,8 @@ public class SettingBookTests
             Assert.Contains($"\"{field}\"", sentence, StringComparison.Ordinal);
         }
 
+        var age = await Journey.Refused(RefusalReason.ValueOutOfRange, () => world.Setting.Record(world.By(world.Kim), right with { DeckAge = -1 }));
+        Assert.Contains("\"deck age\"", age, StringComparison.Ordinal);
         await Journey.Refused(RefusalReason.TextMissing, () => world.Setting.Record(world.By(world.Kim), right with { Points = [] }));
         await Journey.Refused(RefusalReason.TextForbidden, () => world.Setting.Record(world.By(world.Kim), right with { Device = "seal\u202Elaes" }));
     }
