@@ -1,5 +1,6 @@
 using JointPlanner.Archive;
 using JointPlanner.Issuing;
+using JointPlanner.Issuing.Setting;
 using JointPlanner.Web.Rooms.Accounts;
 using JointPlanner.Web.Rooms.Revisions;
 using JointPlanner.Web.Rooms.Structure;
@@ -32,6 +33,7 @@ builder.AddTrustedProxies();
 builder.AddArchive();
 builder.AddRateLimits();
 builder.Services.AddSingleton<RevisionDesk>();
+builder.Services.AddSingleton<SetDayDesk>();
 
 var app = builder.Build();
 

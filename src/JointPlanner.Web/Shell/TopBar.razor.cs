@@ -6,6 +6,10 @@ namespace JointPlanner.Web.Shell;
 /// <summary>Name, rooms, units, paper, person.</summary>
 public sealed partial class TopBar : IDisposable
 {
+    /// <summary>True on a small screen in the field: no rooms, short words.</summary>
+    [Parameter]
+    public bool IsBrief { get; set; }
+
     [Inject]
     private Preferences Preferences { get; set; } = null!;
 
