@@ -46,7 +46,7 @@ public static class IssueSteps
         for (var left = await open.CountAsync(); left > 0; left--)
         {
             await open.First.Locator("summary").ClickAsync();
-            await owner.Gravely(() => open.First.Locator("button").ClickAsync(), page.GetByText($"{left - 1} of"));
+            await owner.Gravely(() => open.First.Locator("button").ClickAsync(), page.GetByText($"Values held from memory: {left - 1} of"));
             await Assertions.Expect(open).ToHaveCountAsync(left - 1);
         }
     }
