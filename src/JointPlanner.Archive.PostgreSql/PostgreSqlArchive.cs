@@ -17,6 +17,10 @@ public sealed class PostgreSqlArchive(string connectionString, string? appRole =
 
     private readonly string _connectionString = InPublicSchema(connectionString);
 
+    // An empty name would break the grants half way through a migration.
+    private readonly string? _appRole = appRole is null || !string.IsNullOrWhiteSpace(appRole) ? appRole
+        : throw new ArchiveNotReady("Archive:AppRole is empty. Name the database role that the program runs as, or leave the setting out where it runs as the owner (Development).");
+
     public override void Configure(DbContextOptionsBuilder options) => Configure(options, _connectionString);
 
     internal static void Configure(DbContextOptionsBuilder options, string connectionString) => options.UseNpgsql(
@@ -39,7 +43,7 @@ public sealed class PostgreSqlArchive(string connectionString, string? appRole =
     protected override IReadOnlyList<Guard> Guards(ArchiveContext context) => PostgreSqlGuards.All(context.Model);
 
     protected override IEnumerable<string> GuardStatements(ArchiveContext context) =>
-        appRole is null ? base.GuardStatements(context) : base.GuardStatements(context).Concat(AppRole.Grants(context.Model, appRole));
+        _appRole is null ? base.GuardStatements(context) : base.GuardStatements(context).Concat(AppRole.Grants(context.Model, _appRole));
 
     protected override async Task<IReadOnlySet<string>> StandingGuards(ArchiveContext context, CancellationToken cancel) =>
         (await context.Database.SqlQueryRaw<string>(

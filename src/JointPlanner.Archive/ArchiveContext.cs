@@ -26,6 +26,7 @@ public sealed class ArchiveContext(DbContextOptions<ArchiveContext> options)
 
     internal DbSet<Organisation> Organisations => Set<Organisation>();
     internal DbSet<Membership> Memberships => Set<Membership>();
+    internal DbSet<PasswordLink> PasswordLinks => Set<PasswordLink>();
     internal DbSet<Certificate> Certificates => Set<Certificate>();
     internal DbSet<Structure> Structures => Set<Structure>();
     internal DbSet<StructureAccess> StructureAccess => Set<StructureAccess>();

@@ -38,15 +38,30 @@ public abstract class ArchiveDatabase : IDbContextFactory<ArchiveContext>, IAsyn
     /// <summary>Throws <see cref="ArchiveNotReady"/> with the sentence for the console when the program must not start on this database.</summary>
     public async Task AssertReady(bool production, CancellationToken cancel = default)
     {
+        await AssertCurrent(cancel);
+        await using var context = CreateDbContext();
+        await AssertSafe(context, production, cancel);
+        var unguarded = await MissingGuards(context, cancel);
+        if (unguarded.Count > 0)
+            throw new ArchiveNotReady($"The database has lost the guard {unguarded[0]} ({unguarded.Count} missing). Run `admin migrate` to make the guards again and `verify-archive` to see whether anything was changed meanwhile.");
+    }
+
+    /// <summary>Throws where the schema is older or newer than this program's.</summary>
+    public async Task AssertCurrent(CancellationToken cancel = default)
+    {
         await using var context = CreateDbContext();
         await RefuseNewer(context, cancel);
         var missing = (await context.Database.GetPendingMigrationsAsync(cancel)).ToList();
         if (missing.Count > 0)
             throw new ArchiveNotReady($"The database lacks {missing.Count} schema step(s), first \"{missing[0]}\". Run `admin migrate` with the owning role, then start again.");
-        await AssertSafe(context, production, cancel);
-        var unguarded = await MissingGuards(context, cancel);
-        if (unguarded.Count > 0)
-            throw new ArchiveNotReady($"The database has lost the guard {unguarded[0]} ({unguarded.Count} missing). Run `admin migrate` to make the guards again and `verify-archive` to see whether anything was changed meanwhile.");
+    }
+
+    /// <summary>Throws where the archive holds a person of the demonstration, and with them the keys made for them.</summary>
+    public async Task AssertNoDemonstration(CancellationToken cancel = default)
+    {
+        await using var context = CreateDbContext();
+        if (await context.Users.Where(person => person.Demonstration).OrderBy(person => person.UserName).Select(person => person.UserName).FirstOrDefaultAsync(cancel) is { } account)
+            throw new ArchiveNotReady($"The archive holds the demonstration's account \"{account}\", whose password and key lie in a file. Such an archive is never used for real work: give Archive:Folder or Archive:ConnectionString of an empty one.");
     }
 
     public ArchiveContext CreateDbContext()

@@ -47,6 +47,12 @@ internal static class ArchiveModel
             table.HasOne<Person>().WithMany().HasForeignKey(row => row.PersonId).OnDelete(Stay);
             table.HasOne<Organisation>().WithMany(row => row.Memberships).HasForeignKey(row => row.OrganisationId).OnDelete(Stay);
         });
+        model.Entity<PasswordLink>(table =>
+        {
+            table.ToTable("PasswordLinks").HasIndex(row => row.TokenHash).IsUnique();
+            table.HasOne<Person>().WithMany().HasForeignKey(row => row.PersonId).OnDelete(Stay);
+            table.HasOne<Person>().WithMany().HasForeignKey(row => row.MadeById).OnDelete(Stay);
+        });
         model.Entity<Certificate>(table =>
         {
             table.ToTable("Certificates").HasIndex(row => row.Fingerprint).IsUnique();

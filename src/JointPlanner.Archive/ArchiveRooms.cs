@@ -24,6 +24,6 @@ public static class ArchiveRooms
             .AddSingleton<BeginRevision>().AddSingleton<FreezeRevision>().AddSingleton<ReturnRevision>().AddSingleton<AcceptRevision>()
             .AddSingleton<SignRevision>().AddSingleton<IssueRevision>().AddSingleton<WithdrawRevision>()
             .AddSingleton<DraftShelf>().AddSingleton<Confirmations>().AddSingleton<SettingBook>().AddSingleton<FieldLinks>()
-            .AddSingleton<OrganisationRegister>().AddSingleton<CertificateRegister>().AddSingleton<StructureRegister>();
+            .AddSingleton<OrganisationRegister>().AddSingleton<AccountRegister>().AddSingleton<PasswordLinks>().AddSingleton<CertificateRegister>().AddSingleton<StructureRegister>();
     }
 }

@@ -10,11 +10,7 @@ using MudBlazor.Services;
 
 var builder = WebApplication.CreateBuilder(args);
 var refusals = Refusals.Before(builder.Configuration, builder.Environment);
-if (refusals.Count > 0)
-{
-    foreach (var refusal in refusals) Console.Error.WriteLine($"Joint Planner does not start: {refusal}");
-    return 3;
-}
+if (refusals.Count > 0) return Stop(refusals);
 
 builder.WebHost.ConfigureKestrel(kestrel => kestrel.Limits.MaxRequestBodySize = 1 << 20);
 builder.Services.AddRazorComponents().AddInteractiveServerComponents(Circuits.Configure);
@@ -30,7 +26,16 @@ builder.Services.AddSingleton(TrustedRoots.Open(ArchiveSetup.Folder(builder.Conf
 builder.Services.AddSingleton(new PlanDesk(OwnerRuleShelf.Read(Path.Combine(AppContext.BaseDirectory, "seed-data", "owner-rules"))));
 builder.Services.AddSingleton(DemoMode.From(builder.Configuration));
 builder.AddTrustedProxies();
-builder.AddArchive();
+builder.Services.AddSingleton<PublicAddress>();
+try
+{
+    builder.AddArchive();
+}
+catch (ArchiveNotReady refusal)
+{
+    return Stop([refusal.Message]);
+}
+
 builder.AddRateLimits();
 builder.Services.AddSingleton<RevisionDesk>();
 builder.Services.AddSingleton<SetDayDesk>();
@@ -61,10 +66,15 @@ try
 }
 catch (ArchiveNotReady refusal)
 {
-    Console.Error.WriteLine($"Joint Planner does not start: {refusal.Message}");
     await app.DisposeAsync();
-    return 3;
+    return Stop([refusal.Message]);
 }
 
 await app.RunAsync();
 return 0;
+
+static int Stop(IEnumerable<string> refusals)
+{
+    foreach (var refusal in refusals) Console.Error.WriteLine($"Joint Planner does not start: {refusal}");
+    return 3;
+}

@@ -32,6 +32,8 @@ public enum Act
 
     // of oneself
     RegisterCertificate,
+    ChangePassword,
+    SetPassword,
 
     // of the installation
     ManageAccounts,

@@ -37,6 +37,10 @@ public sealed class ActDesk(IDbContextFactory<ArchiveContext> archive, TimeProvi
         Guid requestId, string from, Act act, string subject, Func<ActRun, CancellationToken, Task<TAnswer>> does, CancellationToken cancel) =>
         InOneTransaction(requestId, null, from, act, subject, does, cancel);
 
+    /// <summary>The same at the console, before anybody can sign in.</summary>
+    internal Task<TAnswer> OnceAtConsole<TAnswer>(Act act, string subject, Func<ActRun, CancellationToken, Task<TAnswer>> does, CancellationToken cancel) =>
+        InOneTransaction(Guid.CreateVersion7(), null, "console", act, subject, does, cancel);
+
     private async Task<TAnswer> InOneTransaction<TAnswer>(
         Guid requestId, Guid? personId, string from, Act act, string subject, Func<ActRun, CancellationToken, Task<TAnswer>> does, CancellationToken cancel)
     {

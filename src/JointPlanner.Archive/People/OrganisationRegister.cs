@@ -53,17 +53,4 @@ public sealed class OrganisationRegister(ActDesk desk)
             run.Detail = rule.ToString();
             return new OrganisationAnswer(organisationId);
         }, cancel);
-
-    /// <summary>Switches an account off or on; persons are never removed.</summary>
-    public Task<RolesAnswer> SetActive(ActCall call, Guid personId, bool active, CancellationToken cancel = default) =>
-        desk.Once(call, Act.ManageAccounts, $"person {personId:D} active {active}", async (run, stop) =>
-        {
-            run.NeedAdministrator(Act.ManageAccounts);
-            var person = await run.Archive.Users.FirstOrDefaultAsync(row => row.Id == personId, stop) ?? throw new NotFound("person");
-            person.Active = active;
-
-            // A new stamp ends the sessions that are open.
-            person.SecurityStamp = Guid.NewGuid().ToString();
-            return new RolesAnswer(Guid.Empty, personId, []);
-        }, cancel);
 }

@@ -14,4 +14,7 @@ public sealed class Person : IdentityUser<Guid>
 
     /// <summary>Accounts, organisations, roots, seal, time stamp and public address of the installation; no reading of calculations.</summary>
     public bool Administrator { get; set; }
+
+    /// <summary>One of the demonstration's people; with one of these in it no archive is used in Production.</summary>
+    public bool Demonstration { get; set; }
 }

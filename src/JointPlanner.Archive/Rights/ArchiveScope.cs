@@ -132,6 +132,9 @@ public sealed class ArchiveScope : IAsyncDisposable
             .ToDictionaryAsync(person => person.Id, person => person.Name, cancel);
     }
 
+    /// <summary>Oneself; for an administrator everybody with an account.</summary>
+    public IQueryable<Person> People() => _archive.Users.Where(person => Person.Administrator || person.Id == _me);
+
     /// <summary>Memberships in the person's organisations; all of them for an administrator.</summary>
     public IQueryable<Membership> Memberships() => _archive.Memberships.Where(member => Person.Administrator
         || _archive.Memberships.Any(mine => mine.PersonId == _me && mine.OrganisationId == member.OrganisationId));

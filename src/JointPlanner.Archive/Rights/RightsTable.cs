@@ -47,12 +47,12 @@ public static class RightsTable
     ];
 
     /// <summary>Acts that everybody may do for themselves.</summary>
-    public static readonly IReadOnlyList<Act> OfOneself = [Act.RegisterCertificate];
+    public static readonly IReadOnlyList<Act> OfOneself = [Act.RegisterCertificate, Act.ChangePassword, Act.SetPassword];
 
     /// <summary>Acts for which the password is typed again, whoever does them.</summary>
     public static readonly IReadOnlyList<Act> PasswordAgain =
     [
-        Act.Sign, Act.Issue, Act.Withdraw, Act.GiveAccess, Act.ConfirmValue, Act.RevokeConfirmation, Act.SetRule,
+        Act.Sign, Act.Issue, Act.Withdraw, Act.GiveAccess, Act.ConfirmValue, Act.RevokeConfirmation, Act.SetRule, Act.ChangePassword,
         Act.ManageAccounts, Act.ManageOrganisations, Act.ConfirmCertificate, Act.ManageRoots, Act.ManageSeal, Act.ManageTimeStamp, Act.ManagePublicAddress,
     ];
 

@@ -1,5 +1,3 @@
-using System.Buffers.Text;
-using System.Security.Cryptography;
 using JointPlanner.Archive.Acts;
 using JointPlanner.Archive.Auditing;
 using JointPlanner.Archive.Revisions;
@@ -21,10 +19,8 @@ public sealed record FieldView(string StructureName, string Zone, string Joint, 
 /// <summary>Links by which somebody on site opens one joint of one revision without an account.</summary>
 public sealed class FieldLinks(IDbContextFactory<ArchiveContext> archive, ActDesk desk, AuditTrail audit, TimeProvider clock)
 {
-    private const int TokenBytes = 16;
-
     /// <summary>128 random bits, as 22 characters that fit an address.</summary>
-    public static string NewToken() => Base64Url.EncodeToString(RandomNumberGenerator.GetBytes(TokenBytes));
+    public static string NewToken() => LinkToken.New();
 
     public Task<LinkAnswer> Make(ActCall call, LinkRequest request, CancellationToken cancel = default) =>
         desk.Once(call, Act.MakeLink, $"revision {request.RevisionId:D} joint {request.Joint}", async (run, stop) =>
@@ -35,7 +31,7 @@ public sealed class FieldLinks(IDbContextFactory<ArchiveContext> archive, ActDes
                 throw new ActRefused(RefusalReason.WrongState, $"Revision {revision.Number} is {Transitions.Words(revision.State)}; links are made to issued revisions only.");
             if (request.ExpiresAt <= run.Now)
                 throw new ActRefused(RefusalReason.ValueOutOfRange, "The link would have expired already; choose a later day.");
-            if (HashOf(request.Token) is not { } hash)
+            if (LinkToken.HashOf(request.Token) is not { } hash)
                 throw new ActRefused(RefusalReason.ValueOutOfRange, "The link's token is not one of 128 random bits; load the page again.");
             var link = new FieldLink
             {
@@ -80,11 +76,8 @@ public sealed class FieldLinks(IDbContextFactory<ArchiveContext> archive, ActDes
 
     internal async Task<FieldLink> Usable(ArchiveContext context, string token, CancellationToken cancel)
     {
-        var hash = HashOf(token) ?? throw new NotFound("link");
+        var hash = LinkToken.HashOf(token) ?? throw new NotFound("link");
         var link = await context.FieldLinks.AsNoTracking().FirstOrDefaultAsync(row => row.TokenHash == hash, cancel);
         return link is { RevokedAt: null } && link.ExpiresAt > clock.GetUtcNow() ? link : throw new NotFound("link");
     }
-
-    private static string? HashOf(string token) =>
-        Base64Url.IsValid(token, out var length) && length == TokenBytes ? Fingerprint.Of(Base64Url.DecodeFromChars(token)) : null;
 }

@@ -31,7 +31,7 @@ internal static class AdminCommand
         });
         var verify = new Command("verify-archive", "Walks every hash chain of the archive; exit code 3 where one is broken.");
         verify.SetAction((parsed, cancellation) => Walk(parsed.InvocationConfiguration, cancellation));
-        return new Command("admin", "Administration of the database.") { migrate, verify };
+        return new Command("admin", "Administration of the database and of its first account.") { migrate, AccountCommands.Create(), AccountCommands.Link(), verify };
     }
 
     private static async Task<int> Walk(InvocationConfiguration console, CancellationToken cancellation)
@@ -52,14 +52,16 @@ internal static class AdminCommand
         }
     }
 
-    private static ArchiveDatabase Open() => Setting("Archive__Kind") switch
+    /// <summary>The database that the environment names.</summary>
+    internal static ArchiveDatabase Open() => Setting("Archive__Kind") switch
     {
         null or "sqlite" => new SqliteArchive(Path.Combine(
             Setting("Archive__Folder") ?? throw new ArchiveNotReady("Archive__Folder is missing: the folder that holds the SQLite database."), "archive.db")),
         "postgresql" => new PostgreSqlArchive(
-            Setting("Archive__ConnectionString") ?? throw new ArchiveNotReady("Archive__Kind is postgresql, but Archive__ConnectionString is missing."), Setting("Archive__AppRole")),
+            Setting("Archive__ConnectionString") ?? throw new ArchiveNotReady("Archive__Kind is postgresql, but Archive__ConnectionString is missing."), Environment.GetEnvironmentVariable("Archive__AppRole")),
         var other => throw new ArchiveNotReady($"Archive__Kind is \"{other}\". Allowed are sqlite and postgresql."),
     };
 
-    private static string? Setting(string name) => Environment.GetEnvironmentVariable(name) is { Length: > 0 } value ? value : null;
+    /// <summary>A setting of the environment; null where it is missing or empty.</summary>
+    internal static string? Setting(string name) => Environment.GetEnvironmentVariable(name) is { Length: > 0 } value ? value : null;
 }

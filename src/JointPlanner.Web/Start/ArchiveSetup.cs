@@ -59,6 +59,12 @@ internal static class ArchiveSetup
         var migratesHere = archive is SqliteArchive || app.Environment.IsDevelopment();
         if (migratesHere) await archive.Migrate();
         await archive.AssertReady(app.Environment.IsProduction());
+        if (!app.Environment.IsDevelopment())
+        {
+            await archive.AssertNoDemonstration();
+            DemoTraces.Refuse(Folder(app.Configuration, app.Environment));
+        }
+
         if (app.Services.GetRequiredService<DemoMode>().IsOn) await DemoSeed.Sow(app);
     }
 

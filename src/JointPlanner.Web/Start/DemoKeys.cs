@@ -28,7 +28,7 @@ internal static class DemoKeys
     private static async Task Make(CertificateRegister register, string file, Guid administrator, Guid person, string name, string password)
     {
         using var key = ECDsa.Create(ECCurve.NamedCurves.nistP256);
-        var request = new CertificateRequest(new X500DistinguishedName($"CN=\"{name} (demonstration)\""), key, HashAlgorithmName.SHA256);
+        var request = new CertificateRequest(new X500DistinguishedName($"CN=\"{name} {DemoTraces.Mark}\""), key, HashAlgorithmName.SHA256);
         request.CertificateExtensions.Add(new X509KeyUsageExtension(X509KeyUsageFlags.DigitalSignature | X509KeyUsageFlags.NonRepudiation, critical: true));
         var now = TimeProvider.System.GetUtcNow();
         using var certificate = request.CreateSelfSigned(now.AddMinutes(-5), now.AddYears(YearsValid));

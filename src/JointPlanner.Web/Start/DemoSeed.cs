@@ -22,12 +22,18 @@ internal static class DemoSeed
     {
         await using var scope = app.Services.CreateAsyncScope();
         var people = scope.ServiceProvider.GetRequiredService<UserManager<Person>>();
-        var file = Path.Combine(ArchiveSetup.Folder(app.Configuration, app.Environment), "demo-people.json");
+        var file = Path.Combine(ArchiveSetup.Folder(app.Configuration, app.Environment), DemoTraces.PeopleFile);
         var passwords = await Passwords(file);
         foreach (var (account, name, role) in People)
         {
-            if (await people.FindByNameAsync(account) is not null) continue;
-            var person = new Person { UserName = account, Name = name, Administrator = role is null };
+            if (await people.FindByNameAsync(account) is { } known)
+            {
+                // An archive of an earlier program did not mark them yet.
+                if (!known.Demonstration) await people.UpdateAsync(Marked(known));
+                continue;
+            }
+
+            var person = new Person { UserName = account, Name = name, Administrator = role is null, Demonstration = true };
             var made = await people.CreateAsync(person, passwords[account]);
             if (!made.Succeeded) throw new ArchiveNotReady($"The demo person {account} could not be made: {string.Join(' ', made.Errors.Select(e => e.Description))}");
         }
@@ -38,6 +44,12 @@ internal static class DemoSeed
         await DemoKeys.Cut(scope.ServiceProvider, Path.GetDirectoryName(file)!, ids.Single(p => p.Role is null).Id,
             People.Zip(ids).Where(p => p.First.Role is Role.Designer or Role.Checker)
                 .Select(p => (p.First.Account, p.Second.Id, p.First.Name, passwords[p.First.Account])));
+    }
+
+    private static Person Marked(Person person)
+    {
+        person.Demonstration = true;
+        return person;
     }
 
     private static async Task<IReadOnlyList<(Guid Id, Role? Role)>> Ids(UserManager<Person> people)

@@ -4,6 +4,7 @@ using JointPlanner.Archive.People;
 using JointPlanner.Archive.Revisions;
 using JointPlanner.Archive.Rights;
 using JointPlanner.Archive.Tests.Databases;
+using JointPlanner.Archive.Values;
 using Microsoft.EntityFrameworkCore;
 
 namespace JointPlanner.Archive.Tests.Acts;
@@ -118,7 +119,8 @@ public class ActDeskTests
             [Act.ConfirmValue] = () => world.Confirmations.Confirm(Bare(world.Mara), new ConfirmRequest(world.Owner.Id, "v", "d", "e", "p", new DateOnly(2031, 1, 1))),
             [Act.RevokeConfirmation] = () => world.Confirmations.Revoke(Bare(world.Mara), Guid.CreateVersion7(), "x"),
             [Act.SetRule] = () => world.Organisations.SetRule(Bare(world.Mara), world.Owner.Id, new OwnerRule(IssuedBy.Owner, true, true)),
-            [Act.ManageAccounts] = () => world.Organisations.SetActive(Bare(world.Ada), world.Kim.Id, active: false),
+            [Act.ManageAccounts] = () => world.Accounts.SetActive(Bare(world.Ada), world.Kim.Id, active: false),
+            [Act.ChangePassword] = () => world.Accounts.MakeOwnLink(Bare(world.Ines), LinkToken.New()),
             [Act.ManageOrganisations] = () => world.Organisations.SetRoles(Bare(world.Ada), world.Owner.Id, world.Kim.Id, [Role.Designer]),
             [Act.ConfirmCertificate] = () => world.Certificates.Confirm(Bare(world.Ada), Guid.CreateVersion7(), "x"),
         };

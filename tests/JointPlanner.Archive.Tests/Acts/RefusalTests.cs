@@ -220,7 +220,7 @@ public class RefusalTests
         await Assert.ThrowsAsync<NotFound>(() => world.Frozen());
         await world.Organisations.SetRoles(world.By(world.Ada), world.Office.Id, world.Ines.Id, [Role.Designer]);
         await world.Frozen();
-        await world.Organisations.SetActive(world.By(world.Ada), world.Otto.Id, active: false);
+        await world.Accounts.SetActive(world.By(world.Ada), world.Otto.Id, active: false);
         await Assert.ThrowsAsync<NotFound>(() => world.Return.Do(world.By(world.Otto), new ReturnRequest(world.RevisionId, [new("Again.")])));
     }
 

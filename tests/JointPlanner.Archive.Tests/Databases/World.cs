@@ -45,6 +45,8 @@ public sealed class World : IAsyncDisposable
     public SettingBook Setting => new(Desk, Links);
     public StructureRegister Structures => new(Desk);
     public OrganisationRegister Organisations => new(Desk);
+    public AccountRegister Accounts => new(Desk);
+    public PasswordLinks PasswordLinks => new(Archive, Desk, Clock);
     public CertificateRegister Certificates => new(Desk);
 
     public Organisation Owner { get; } = new() { Name = "Roads Board of Northmark" };

@@ -58,7 +58,7 @@ public class RegisterTests
         await using var world = await World.Make(kind);
         await Journey.Refused(RefusalReason.NotYourAct, () => world.Organisations.Create(world.By(world.Mara), "A new board"));
         await Journey.Refused(RefusalReason.NotYourAct, () => world.Organisations.SetRoles(world.By(world.Mara), world.Owner.Id, world.Mara.Id, [Role.Designer]));
-        await Journey.Refused(RefusalReason.NotYourAct, () => world.Organisations.SetActive(world.By(world.Mara), world.Kim.Id, active: false));
+        await Journey.Refused(RefusalReason.NotYourAct, () => world.Accounts.SetActive(world.By(world.Mara), world.Kim.Id, active: false));
 
         var made = await world.Organisations.Create(world.By(world.Ada), "A new board");
         await Journey.Refused(RefusalReason.AlreadyDone, () => world.Organisations.Create(world.By(world.Ada), "A new board"));

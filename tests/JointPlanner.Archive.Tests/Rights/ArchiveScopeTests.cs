@@ -118,7 +118,7 @@ public class ArchiveScopeTests
     public async Task A_deactivated_person_has_no_scope(Kind kind)
     {
         await using var world = await World.Make(kind);
-        await world.Organisations.SetActive(world.By(world.Ada), world.Kim.Id, active: false);
+        await world.Accounts.SetActive(world.By(world.Ada), world.Kim.Id, active: false);
         await Assert.ThrowsAsync<NotFound>(() => world.As(world.Kim));
     }
 }

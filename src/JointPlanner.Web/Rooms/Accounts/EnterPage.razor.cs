@@ -16,6 +16,10 @@ public sealed partial class EnterPage
     [SupplyParameterFromQuery(Name = "back")]
     public string? Back { get; set; }
 
+    /// <summary>Given after a password was set by a link.</summary>
+    [SupplyParameterFromQuery(Name = "set")]
+    public string? PasswordSet { get; set; }
+
     [Inject]
     private Door Door { get; set; } = null!;
 
