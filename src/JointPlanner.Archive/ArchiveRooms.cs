@@ -3,6 +3,7 @@ using JointPlanner.Archive.Auditing;
 using JointPlanner.Archive.Confirming;
 using JointPlanner.Archive.Drafts;
 using JointPlanner.Archive.People;
+using JointPlanner.Archive.Revisions;
 using JointPlanner.Archive.Setting;
 using JointPlanner.Archive.Structures;
 using Microsoft.EntityFrameworkCore;
@@ -24,6 +25,7 @@ public static class ArchiveRooms
             .AddSingleton<BeginRevision>().AddSingleton<FreezeRevision>().AddSingleton<ReturnRevision>().AddSingleton<AcceptRevision>()
             .AddSingleton<SignRevision>().AddSingleton<IssueRevision>().AddSingleton<WithdrawRevision>()
             .AddSingleton<DraftShelf>().AddSingleton<Confirmations>().AddSingleton<SettingBook>().AddSingleton<FieldLinks>()
-            .AddSingleton<OrganisationRegister>().AddSingleton<AccountRegister>().AddSingleton<PasswordLinks>().AddSingleton<CertificateRegister>().AddSingleton<StructureRegister>();
+            .AddSingleton<OrganisationRegister>().AddSingleton<AccountRegister>().AddSingleton<PasswordLinks>().AddSingleton<CertificateRegister>().AddSingleton<StructureRegister>()
+            .AddSingleton<SheetLookup>();
     }
 }

@@ -1,5 +1,6 @@
 using System.CommandLine;
 using JointPlanner.Cli.Admin;
+using JointPlanner.Cli.Comparing;
 using JointPlanner.Cli.Compute;
 using JointPlanner.Cli.Sheets;
 using JointPlanner.Cli.Signing;
@@ -23,6 +24,7 @@ internal static class CommandLine
             SheetCommand.Make(),
             SignCommand.Make(),
             VerifyCommand.Make(),
+            RunAgainCommand.Make(),
             AdminCommand.Make(),
         };
         var parsed = root.Parse(arguments);

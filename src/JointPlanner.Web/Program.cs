@@ -39,6 +39,7 @@ catch (ArchiveNotReady refusal)
 builder.AddRateLimits();
 builder.Services.AddSingleton<RevisionDesk>();
 builder.Services.AddSingleton<SetDayDesk>();
+builder.Services.AddSingleton<FormSays>();
 
 var app = builder.Build();
 
@@ -54,6 +55,7 @@ app.UseStatusCodePagesWithReExecute("/status/{0}");
 app.UseAuthentication();
 app.UseRateLimiter();
 app.UseAuthorization();
+app.UseMiddleware<TooLarge>();
 app.UseAntiforgery();
 app.MapStaticAssets();
 app.MapHealthChecks("/health");

@@ -54,11 +54,11 @@ public static class IssueSteps
     private static async Task Sign(this RunningSite site, Visitor signer, string account)
     {
         var page = signer.Page;
-        await signer.Gravely(null, page.Locator("details.more summary"));
-        await page.ClickAsync("details.more summary");
+        await signer.Gravely(null, page.Locator("details.more:has(#key) summary"));
+        await page.ClickAsync("details.more:has(#key) summary");
         await page.SetInputFilesAsync("#key", site.KeyFile(account));
         await page.FillAsync("#word", site.Password(account));
-        await page.ClickAsync("details.more button[type=submit]");
+        await page.ClickAsync("details.more:has(#key) button[type=submit]");
         await Assertions.Expect(page.Locator($"text=signed by the {account}")).ToBeVisibleAsync();
     }
 

@@ -12,6 +12,9 @@ public sealed class RunningSite : WebApplicationFactory<Program>, IAsyncLifetime
     private IPlaywright? playwright;
     private IBrowser? browser;
 
+    /// <summary>Folder of this installation's own files.</summary>
+    public string Folder => folder;
+
     public string Address => ClientOptions.BaseAddress.ToString().TrimEnd('/');
 
     public async ValueTask InitializeAsync()

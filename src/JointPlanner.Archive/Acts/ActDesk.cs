@@ -32,7 +32,16 @@ public sealed class ActDesk(IDbContextFactory<ArchiveContext> archive, TimeProvi
         }
     }
 
-    /// <summary>The same for the holder of a field link, who is nobody with an account.</summary>
+    /// <summary>The answer that this request got before; null where it was not done yet. For work before the act that a second press must not repeat.</summary>
+    internal async Task<TAnswer?> Given<TAnswer>(ActCall call, Act act, string subject, CancellationToken cancel)
+        where TAnswer : class
+    {
+        await using var context = await archive.CreateDbContextAsync(cancel);
+        var receipt = await context.ActReceipts.FindAsync([call.RequestId], cancel);
+        return receipt is null ? null : Answered<TAnswer>(receipt, call.PersonId, act, subject);
+    }
+
+    /// <summary><see cref="Once"/> for the holder of a field link, who is nobody with an account.</summary>
     internal Task<TAnswer> OnceByLink<TAnswer>(
         Guid requestId, string from, Act act, string subject, Func<ActRun, CancellationToken, Task<TAnswer>> does, CancellationToken cancel) =>
         InOneTransaction(requestId, null, from, act, subject, does, cancel);

@@ -20,7 +20,11 @@ public sealed record SignAnswer(Guid RevisionId, string DocumentHash);
 public sealed class SignRevision(ActDesk desk)
 {
     public Task<SignAnswer> Do(ActCall call, SignRequest request, CancellationToken cancel = default) =>
-        desk.Once(call, Act.Sign, $"revision {request.RevisionId:D} field {request.Field}", (run, stop) => Sign(run, request, stop), cancel);
+        desk.Once(call, Act.Sign, Subject(request.RevisionId, request.Field), (run, stop) => Sign(run, request, stop), cancel);
+
+    /// <summary>What this request was answered before; null where it was not. A signature is made anew at each press, so a second press has to ask first.</summary>
+    public Task<SignAnswer?> Given(ActCall call, Guid revisionId, SignatureField field, CancellationToken cancel = default) =>
+        desk.Given<SignAnswer>(call, Act.Sign, Subject(revisionId, field), cancel);
 
     private static async Task<SignAnswer> Sign(ActRun run, SignRequest request, CancellationToken cancel)
     {
@@ -63,6 +67,8 @@ public sealed class SignRevision(ActDesk desk)
         if (stored.Segments.Any(segment => segment.PublicKeyHash == facts.PublicKeyHash))
             throw new ActRefused(RefusalReason.SameKey, "The other field was signed with the same key; designer and checker need keys of their own.");
     }
+
+    private static string Subject(Guid revisionId, SignatureField field) => $"revision {revisionId:D} field {field}";
 
     private static string Word(SignatureField field) => field == SignatureField.Designer ? "designer" : "checker";
 }

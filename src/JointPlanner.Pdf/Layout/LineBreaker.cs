@@ -5,6 +5,10 @@ namespace JointPlanner.Pdf.Layout;
 /// <summary>Breaks words into lines: at spaces, after hyphens and slashes, and anywhere in a word that is wider than the line (a hash).</summary>
 internal sealed class LineBreaker(TextSetter setter, double width, TextLook look)
 {
+    // A column as wide as its widest number comes out of additions a hair narrower; the number is not cut for that.
+    private const double Hair = 1e-6;
+
+    private readonly double _room = width + Hair;
     private readonly List<Piece> _lines = [];
     private readonly List<(Piece Piece, double SpaceBefore)> _line = [];
     private readonly StringBuilder _letters = new();
@@ -58,7 +62,7 @@ internal sealed class LineBreaker(TextSetter setter, double width, TextLook look
         var partWidth = setter.Width(part, partLook);
         MakeRoom(partWidth);
         PutSpace(partLook);
-        while (partWidth > width - _used && part.Length > 1)
+        while (partWidth > _room - _used && part.Length > 1)
         {
             var fits = Fitting(part, partLook);
             PutLetters(part[..fits], partLook);
@@ -73,7 +77,7 @@ internal sealed class LineBreaker(TextSetter setter, double width, TextLook look
     private void MakeRoom(double partWidth)
     {
         var space = _spaceWaits ? setter.Width(" ", look) : 0;
-        if (_used > 0 && _used + space + partWidth > width) EndLine();
+        if (_used > 0 && _used + space + partWidth > _room) EndLine();
     }
 
     private void PutSpace(TextLook spaceLook)
@@ -112,7 +116,7 @@ internal sealed class LineBreaker(TextSetter setter, double width, TextLook look
         foreach (var rune in part.EnumerateRunes())
         {
             total += setter.Width(rune.ToString(), partLook);
-            if (total > width - _used && fits > 0) break;
+            if (total > _room - _used && fits > 0) break;
             fits += rune.Utf16SequenceLength;
         }
         return fits;

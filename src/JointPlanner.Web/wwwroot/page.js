@@ -66,3 +66,11 @@ document.addEventListener('submit', async event => {
   button.disabled = false;
   answer.dispatchEvent(new Event('change', { bubbles: true }));
 });
+// A file that its form does not take is told before it is sent.
+document.addEventListener('change', event => {
+  const most = Number(event.target.dataset?.most);
+  if (!most) return;
+  const large = [...event.target.files].find(file => file.size > most);
+  event.target.setCustomValidity(large ? `${large.name} is larger than ${event.target.dataset.mostSaid}. Choose the sheet itself.` : '');
+  if (large) event.target.reportValidity();
+});

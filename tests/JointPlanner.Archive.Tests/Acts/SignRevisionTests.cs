@@ -87,4 +87,18 @@ public class SignRevisionTests
         request = request with { Facts = request.Facts with { PublicKeyHash = Journey.KeyOf(world.Ines) } };
         await Journey.Refused(RefusalReason.SameKey, () => world.Sign.Do(world.By(world.Otto), request));
     }
+
+    [Theory, BothDatabases]
+    public async Task A_request_is_told_its_first_answer_before_it_makes_another_signature(Kind kind)
+    {
+        await using var world = await World.Make(kind);
+        await world.Frozen();
+        var call = world.By(world.Ines);
+        Assert.Null(await world.Sign.Given(call, world.RevisionId, SignatureField.Designer));
+        var answer = await world.Sign.Do(call, await world.SignRequest(world.Ines, world.RevisionId, SignatureField.Designer));
+        Assert.Equal(answer, await world.Sign.Given(call, world.RevisionId, SignatureField.Designer));
+        Assert.Null(await world.Sign.Given(world.By(world.Ines), world.RevisionId, SignatureField.Designer));
+        await Journey.Refused(RefusalReason.RequestIdReused, () => world.Sign.Given(call, world.RevisionId, SignatureField.Checker));
+        await Journey.Refused(RefusalReason.RequestIdReused, () => world.Sign.Given(call with { PersonId = world.Otto.Id }, world.RevisionId, SignatureField.Designer));
+    }
 }

@@ -14,8 +14,16 @@ public class LineBreakerTests
     public void No_line_is_wider_than_asked_and_no_letter_is_lost(double width)
     {
         var (lines, text) = Break(Prose, width);
-        Assert.All(lines, l => Assert.True(l.Width <= width + 1e-9));
+        Assert.All(lines, l => Assert.True(l.Width <= width + 1e-6));
         Assert.Equal(Prose.Replace(" ", "", StringComparison.Ordinal), string.Concat(text).Replace(" ", "", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void A_number_is_not_cut_because_its_column_came_out_a_hair_narrower_than_the_number()
+    {
+        var width = new TextSetter(TypeSet.Standard).Width("1.200", TextLook.Body);
+        Assert.Equal(["1.200"], Break("1.200", width - 1e-12).Text);
+        Assert.Equal(2, Break("1.200", width - 0.1).Text.Count);
     }
 
     [Fact]

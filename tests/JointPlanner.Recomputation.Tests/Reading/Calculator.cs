@@ -74,7 +74,7 @@ public sealed partial class Calculator
                 var by = Power();
                 product = new(product.Value * by.Value, product.Powers + by.Powers);
             }
-            else if (Takes(" / "))
+            else if (Takes(" / ") || Takes("/")) // a sheet sets a fraction, whose line form has a bare bar
             {
                 var by = Power();
                 product = new(product.Value / by.Value, product.Powers - by.Powers);
@@ -86,8 +86,19 @@ public sealed partial class Calculator
     private Amount Power()
     {
         var value = Atom();
+        if (Takes("^")) return Raised(value); // a sheet raises the exponent, whose line form has this sign
         if (at >= text.Length || text[at] is not ('⁻' or '⁰' or '¹' or '²' or '³' or '⁴' or '⁵' or '⁶' or '⁷' or '⁸' or '⁹')) return value;
         var exponent = PrintedValue.RaisedNumber(text, ref at);
+        return new(Math.Pow(value.Value, exponent), value.Powers * exponent);
+    }
+
+    private Amount Raised(Amount value)
+    {
+        var sign = Takes("−") ? -1 : 1;
+        var start = at;
+        while (at < text.Length && char.IsAsciiDigit(text[at])) at++;
+        if (at == start) throw Unreadable();
+        var exponent = sign * int.Parse(text[start..at], CultureInfo.InvariantCulture);
         return new(Math.Pow(value.Value, exponent), value.Powers * exponent);
     }
 

@@ -6,11 +6,14 @@ namespace JointPlanner.Recomputation.Tests.Reading;
 public static class Recomputer
 {
     /// <summary>What is wrong with the text, a sentence each; empty when all of it holds.</summary>
-    public static IReadOnlyList<string> Complaints(string text)
+    public static IReadOnlyList<string> Complaints(string text) => Complaints(StepBlock.All(text));
+
+    /// <summary>The same for steps that were read already.</summary>
+    public static IReadOnlyList<string> Complaints(IReadOnlyList<StepBlock> steps)
     {
         var complaints = new List<string>();
         var known = new Dictionary<int, StepBlock>();
-        foreach (var step in StepBlock.All(text))
+        foreach (var step in steps)
         {
             if (step.Calculation is not null) complaints.AddRange(Check(step, known).Select(c => $"step {step.Number} ({step.Heading}): {c}"));
             if (Math.Abs(step.CarriedOn.Amount - step.Result.Amount) > (0.5 + 1e-6) * step.Result.LastDigit)

@@ -7,6 +7,7 @@ using JointPlanner.Archive.Revisions;
 using JointPlanner.Archive.Rights;
 using JointPlanner.Exchange.Plans;
 using JointPlanner.Issuing;
+using JointPlanner.Issuing.Comparing;
 using JointPlanner.Web.Rooms.Structure;
 using JointPlanner.Web.Start;
 using Microsoft.EntityFrameworkCore;
@@ -53,6 +54,17 @@ public sealed class RevisionDesk(
         using var certificate = X509CertificateLoader.LoadCertificate(mine.Encoded);
         var facts = SignatureJudge.Facts(stored.Bytes, signed, field, certificate, clock.GetUtcNow());
         await signing.Do(call, new SignRequest(revisionId, field, expectedHash, signed, facts));
+    }
+
+    /// <summary>Whether this very request has signed already.</summary>
+    public async Task<bool> WasSigned(ActCall call, Guid revisionId, SignatureField field) => await signing.Given(call, revisionId, field) is not null;
+
+    /// <summary>Computes a frozen revision again from its stored package and compares; nothing is changed and nothing is written.</summary>
+    public async Task<RunAgain> RunAgain(Guid personId, Guid revisionId, CancellationToken cancellation)
+    {
+        await using var scope = await ArchiveScope.Enter(archive, personId, cancellation);
+        var package = await scope.Packages().FirstOrDefaultAsync(p => p.RevisionId == revisionId, cancellation) ?? throw new NotFound("revision");
+        return await Task.Run(() => Issuing.Comparing.RunAgain.Of(Encoding.UTF8.GetBytes(package.PackageText), Encoding.UTF8.GetBytes(package.ResultsText), cancellation), cancellation);
     }
 
     /// <summary>Issues a checked revision, judged from its frozen package and its sheet alone.</summary>

@@ -2,26 +2,25 @@ using JointPlanner.Archive;
 using JointPlanner.Archive.Acts;
 using JointPlanner.Archive.Rights;
 using JointPlanner.Web.Shared;
+using JointPlanner.Web.Shell;
 using Microsoft.AspNetCore.Components;
 using Microsoft.EntityFrameworkCore;
 
 namespace JointPlanner.Web.Rooms.Revisions;
 
-/// <summary>One revision: what was frozen, who signed, and the next step of its life.</summary>
-public sealed partial class RevisionPage
+/// <summary>One revision: what was frozen, what differs from the last issue, who signed, and the next step of its life.</summary>
+public sealed partial class RevisionPage : IDisposable
 {
     private RevisionView? view;
-    private Guid request = Guid.CreateVersion7();
-    private string says = "", remark = "";
-    private bool isMissing, isWorking;
-    private EventCallback waiting;
+    private string says = "";
+    private bool isMissing;
 
     /// <summary>Id of the revision.</summary>
     [Parameter]
     public Guid Id { get; set; }
 
     /// <summary>What a plain form that led here had to say.</summary>
-    [SupplyParameterFromQuery(Name = "says")]
+    [SupplyParameterFromQuery(Name = FormSays.Name)]
     public string? Said { get; set; }
 
     [Inject]
@@ -31,19 +30,26 @@ public sealed partial class RevisionPage
     private Caller Caller { get; set; } = null!;
 
     [Inject]
-    private RevisionDesk Desk { get; set; } = null!;
+    private FormSays Forms { get; set; } = null!;
 
     [Inject]
-    private ReturnRevision Returning { get; set; } = null!;
+    private Preferences Preferences { get; set; } = null!;
 
-    [Inject]
-    private AcceptRevision Accepting { get; set; } = null!;
+    /// <inheritdoc/>
+    public void Dispose() => Preferences.Changed -= Redraw;
 
-    [Inject]
-    private WithdrawRevision Withdrawing { get; set; } = null!;
+    /// <inheritdoc/>
+    protected override void OnInitialized() => Preferences.Changed += Redraw;
 
     /// <inheritdoc/>
     protected override Task OnParametersSetAsync() => Read();
+
+    private IEnumerable<string> Says(RevisionView shown)
+    {
+        if (shown.Alteration.Length > 0) yield return shown.Alteration;
+        if (says.Length > 0) yield return says;
+        else if (Said is { Length: > 0 } note && Forms.Open(note, Id) is { } said) yield return said;
+    }
 
     private async Task Read()
     {
@@ -52,6 +58,7 @@ public sealed partial class RevisionPage
         {
             await using var scope = await ArchiveScope.Enter(Archive, person);
             view = await RevisionView.Read(scope, Id);
+            if (view.Frozen?.Stored is { } stored) Preferences.Suggest(stored.Package.Units == "us" ? UnitProfile.Us : UnitProfile.Metric);
         }
         catch (NotFound)
         {
@@ -59,36 +66,11 @@ public sealed partial class RevisionPage
         }
     }
 
-    private Task Freeze() => Do(call => Desk.Freeze(call, Id));
-
-    private Task Accept() => Do(call => Accepting.Do(call, new AcceptRequest(Id, view!.Package!.PackageHash)));
-
-    private Task Return() => Do(call => Returning.Do(call, new ReturnRequest(Id, [new RemarkText(remark)])));
-
-    private Task Issue() => Do(call => Desk.Issue(call, Id));
-
-    private Task Withdraw() => Do(call => Withdrawing.Do(call, new WithdrawRequest(Id, remark)));
-
-    private async Task Do(Func<ActCall, Task> act)
+    private async Task Done(string refusal)
     {
-        (isWorking, says, waiting) = (true, "", default);
-        try
-        {
-            // A second press while the first is under way carries the same id and gets the same answer.
-            await act(await Caller.Now(request));
-            remark = "";
-        }
-        catch (ActRefused refused) when (refused.Reason == RefusalReason.PasswordNeeded)
-        {
-            waiting = EventCallback.Factory.Create(this, () => Do(act));
-        }
-        catch (Exception refused) when (refused is ActRefused or NotFound or InvalidDataException)
-        {
-            says = refused.Message;
-        }
-
-        request = Guid.CreateVersion7();
+        says = refusal;
         await Read();
-        isWorking = false;
     }
+
+    private void Redraw() => InvokeAsync(StateHasChanged);
 }

@@ -10,7 +10,7 @@ namespace JointPlanner.Web.Rooms.Revisions;
 /// <summary>One revision as one person sees it, and what they may do with it.</summary>
 public sealed record RevisionView
 {
-    private static readonly Act[] Asked = [Act.Freeze, Act.Return, Act.Accept, Act.Sign, Act.Issue, Act.Withdraw];
+    private static readonly Act[] Asked = [Act.Begin, Act.Freeze, Act.Return, Act.Accept, Act.Sign, Act.Issue, Act.Withdraw];
 
     /// <summary>The revision with its states.</summary>
     public required Revision Revision { get; init; }
@@ -18,17 +18,27 @@ public sealed record RevisionView
     public required Archive.Structures.Structure Structure { get; init; }
     /// <summary>What was frozen; null for a draft.</summary>
     public FrozenPackage? Package { get; init; }
+    /// <summary>What the stored package and results say, and what differs from the last issue; null for a draft and where they were altered.</summary>
+    public FrozenView? Frozen { get; init; }
+    /// <summary>What is wrong with the stored bytes; empty where nothing is.</summary>
+    public string Alteration { get; init; } = "";
     /// <summary>Hash of the sheet as it stands; empty for a draft.</summary>
     public string DocumentHash { get; init; } = "";
     /// <summary>Fields that are signed.</summary>
     public IReadOnlyList<SignatureField> SignedFields { get; init; } = [];
-    /// <summary>Remarks of the checker.</summary>
-    public IReadOnlyList<string> Remarks { get; init; } = [];
+    /// <summary>Every revision of the structure that the person may see, latest first.</summary>
+    public IReadOnlyList<ChainLink> Chain { get; init; } = [];
     /// <summary>Roles by which the person may do each act.</summary>
     public required IReadOnlyDictionary<Act, IReadOnlyList<Role>> Roles { get; init; }
 
     /// <summary>Whether the person may do the act at all; the archive asks again when it is done.</summary>
     public bool May(Act act) => Roles[act].Count > 0;
+
+    /// <summary>The draft that stands open; null for none.</summary>
+    public ChainLink? OpenDraft => Chain.FirstOrDefault(link => link.State == RevisionState.Draft);
+
+    /// <summary>True where the next revision may be begun from here.</summary>
+    public bool MayBeginNext => May(Act.Begin) && Structure.ClosedAt is null && Revision.State is RevisionState.Issued or RevisionState.Superseded or RevisionState.Withdrawn;
 
     /// <summary>The field that this person may sign now; null for none.</summary>
     public SignatureField? MySignature
@@ -61,7 +71,7 @@ public sealed record RevisionView
         var revision = await scope.Revisions().Include(r => r.States).FirstOrDefaultAsync(r => r.Id == id) ?? throw new NotFound("revision");
         var structure = await scope.Structures().FirstAsync(s => s.Id == revision.StructureId);
         var package = await scope.Packages().FirstOrDefaultAsync(p => p.RevisionId == id);
-        var document = package is null ? null : await scope.Document(id);
+        var (document, alteration) = package is null ? (null, "") : await Stored(scope, package);
         var roles = new Dictionary<Act, IReadOnlyList<Role>>();
         foreach (var act in Asked) roles[act] = await scope.RolesFor(act, structure.Id);
         return new RevisionView
@@ -69,10 +79,26 @@ public sealed record RevisionView
             Revision = revision,
             Structure = structure,
             Package = package,
+            Frozen = package is not null && alteration.Length == 0 ? await FrozenView.Read(scope, revision, package) : null,
+            Alteration = alteration,
             DocumentHash = document?.Hash ?? "",
             SignedFields = [.. (document?.Segments ?? []).Select(s => s.Field).OfType<SignatureField>()],
-            Remarks = await scope.Remarks().Where(r => r.RevisionId == id).OrderBy(r => r.Position).Select(r => r.Text).ToListAsync(),
+            Chain = await ChainLink.All(scope, structure.Id),
             Roles = roles,
         };
+    }
+
+    private static async Task<(StoredDocument? Document, string Alteration)> Stored(ArchiveScope scope, FrozenPackage package)
+    {
+        if (!package.IsIntact)
+            return (null, "The stored calculation package was altered: it no longer gives the hash that it was frozen with. Nothing of it is shown or done; tell the administrator to run verify-archive.");
+        try
+        {
+            return (await scope.Document(package.RevisionId), "");
+        }
+        catch (ActRefused altered) when (altered.Reason == RefusalReason.Altered)
+        {
+            return (null, altered.Message);
+        }
     }
 }

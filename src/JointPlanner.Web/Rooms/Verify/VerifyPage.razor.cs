@@ -1,4 +1,5 @@
-using JointPlanner.Pdf.Verifying;
+using JointPlanner.Archive.Revisions;
+using JointPlanner.Issuing.Verifying;
 using JointPlanner.Web.Start;
 using Microsoft.AspNetCore.Components;
 
@@ -10,7 +11,7 @@ public sealed partial class VerifyPage
     private const int MostBytes = 25 * 1024 * 1024;
     private static readonly TimeSpan Longest = TimeSpan.FromSeconds(5);
 
-    private VerificationReport? report;
+    private SheetVerification? seen;
     private string says = "";
 
     /// <summary>The file handed in.</summary>
@@ -19,6 +20,9 @@ public sealed partial class VerifyPage
 
     [Inject]
     private TrustedRoots Roots { get; set; } = null!;
+
+    [Inject]
+    private SheetLookup Lookup { get; set; } = null!;
 
     private async Task Look()
     {
@@ -39,7 +43,7 @@ public sealed partial class VerifyPage
         using var stop = new CancellationTokenSource(Longest);
         try
         {
-            report = new Verifier(Roots.Certificates).Verify(bytes.ToArray(), null, stop.Token);
+            seen = await SheetVerification.Of(bytes.ToArray(), Roots.Certificates, Lookup, stop.Token);
         }
         catch (OperationCanceledException)
         {
