@@ -24,6 +24,7 @@ internal sealed class NumberComparison(Result? computed)
             .. now.Keys.Union(then.Keys).Select(key => (Before: then.GetValueOrDefault(key), After: now.GetValueOrDefault(key)))
                 .Where(p => p.Before is null || p.After is null || Differ(tolerances.Compare(p.After.Key, p.Before.Value, p.After.Value)))
                 .Select(p => Difference(p.Before, p.After)),
+            .. OfJoints(before, after),
         ];
     }
 
@@ -61,6 +62,15 @@ internal sealed class NumberComparison(Result? computed)
         return new(value.Key, steps.GetValueOrDefault(value.Key)?.Meaning ?? value.Key, quantity, before?.Value, after?.Value);
     }
 
+    private IEnumerable<ResultDifference> OfJoints(StoredResults before, StoredResults after)
+    {
+        var (then, now) = (JointNumbers.Of(before), JointNumbers.Of(after));
+        return now.Keys.Union(then.Keys).Select(key => (Key: key, Before: then.GetValueOrDefault(key), After: now.GetValueOrDefault(key)))
+            .Where(p => p.Before is null || p.After is null
+                || Differ(Tolerances.Compare(p.Before.Value, p.After.Value, Math.Max(Math.Abs(p.Before.Value), Math.Abs(p.After.Value)))))
+            .Select(p => new ResultDifference(p.Key, (p.After ?? p.Before)!.Meaning, (p.After ?? p.Before)!.Quantity, p.Before?.Value, p.After?.Value));
+    }
+
     private TableDifference Table(string joint, string method, StoredTable? before, StoredTable? after)
     {
         var (then, now) = (Rows(before), Rows(after));
@@ -78,6 +88,7 @@ internal sealed class NumberComparison(Result? computed)
         (double?, double?)[] numbers =
         [
             (before.Least, after.Least), (before.Set, after.Set), (before.Greatest, after.Greatest), (before.Minus, after.Minus), (before.Plus, after.Plus), (before.Reserve, after.Reserve),
+            (before.Along?.Set, after.Along?.Set), (before.Along?.Minus, after.Along?.Minus), (before.Along?.Plus, after.Along?.Plus),
         ];
         var largest = numbers.SelectMany(n => new[] { n.Item1, n.Item2 }).Max(n => Math.Abs(n ?? 0));
         var differs = false;

@@ -119,6 +119,24 @@ public sealed class ComparisonTests
     }
 
     [Fact]
+    public void A_limit_and_a_movement_still_to_come_are_compared_joint_by_joint()
+    {
+        var frozen = Frozen.Of(SeedData.Structure(Name));
+        var planted = frozen.With(r => r with
+        {
+            Joints = [.. r.Joints.Select(j => j.Joint != "j1" ? j : j with
+            {
+                Limits = [j.Limits[0] with { Value = j.Limits[0].Value + 0.001 }, .. j.Limits.Skip(1)],
+                ToCome = [j.ToCome[0] with { OpensBy = j.ToCome[0].OpensBy + 0.002 }, .. j.ToCome.Skip(1)],
+            })],
+        });
+        var results = Comparison.Of(frozen.Read(), planted.Read()).Results;
+        Assert.Equal(2, results.Length);
+        Assert.Contains(results, r => r.Key.StartsWith("joint/j1/limit/", StringComparison.Ordinal) && DifferenceText.Moved(r, DisplayProfile.Metric) == "wider by 1.0 mm");
+        Assert.Contains(results, r => r.Key.StartsWith("joint/j1/to-come/", StringComparison.Ordinal) && DifferenceText.Moved(r, DisplayProfile.Metric) == "opens more, by 2.0 mm");
+    }
+
+    [Fact]
     public void Results_of_another_package_are_refused()
     {
         var (one, other) = (Frozen.Of(SeedData.Structure(Name)), Frozen.Of(SeedData.Structure("plover-flats-bridge")));
