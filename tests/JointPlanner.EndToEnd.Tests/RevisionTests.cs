@@ -97,8 +97,6 @@ public sealed class RevisionTests(RunningSite site) : IClassFixture<RunningSite>
             var overflow = await checker.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
             Assert.True(overflow <= 0, string.Create(CultureInfo.InvariantCulture, $"{width}, {paper}: the page is {overflow} px wider than the screen"));
             Assert.Empty(checker.Troubles);
-            if (Environment.GetEnvironmentVariable("JOINT_PLANNER_PICTURES") is { Length: > 0 } folder)
-                await checker.Page.ScreenshotAsync(new() { Path = Path.Combine(folder, string.Create(CultureInfo.InvariantCulture, $"revision-{width}-{paper}.png")), FullPage = true });
         }
     }
 
