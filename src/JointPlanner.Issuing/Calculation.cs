@@ -91,12 +91,13 @@ public sealed record Calculation
     public StoredResults Stored(string packageHash)
     {
         var result = Result ?? throw new InvalidOperationException("There are no results to store.");
-        if (EngineOwner is not { } owner) return ResultsFile.Of(result, ProgramVersion.Number, packageHash, null, []);
-        var day = new StoredDay(Profile.Id, owner.Rules.UseWithin,
-            [.. SettingDays.Methods(result.Plan, owner.Rules).Select(m => new StoredMethod(m.Id, m.Name, m.TemperatureUncertainty, m.Source))],
-            [.. result.Plan.SettingDay.Points.Select(p => new StoredPoint(p.Id, p.Name, p.Weight))]);
-        return ResultsFile.Of(result, ProgramVersion.Number, packageHash, day, SettingDays.Of(result, owner, Profile.DayStep));
+        return ResultsFile.Of(result, ProgramVersion.Number, packageHash, Day, EngineOwner is { } owner ? SettingDays.Of(result, owner, Profile.DayStep) : []);
     }
+
+    /// <summary>What holds for every joint on the day of setting; null where no joint is set by this calculation.</summary>
+    public StoredDay? Day => Result is not { } result || EngineOwner is not { } owner ? null : new StoredDay(Profile.Id, owner.Rules.UseWithin,
+        [.. SettingDays.Methods(result.Plan, owner.Rules).Select(m => new StoredMethod(m.Id, m.Name, m.TemperatureUncertainty, m.Source))],
+        [.. result.Plan.SettingDay.Points.Select(p => new StoredPoint(p.Id, p.Name, p.Weight))]);
 
     private Owner? EngineOwner => Owner?.Rules is { } rules ? new Owner(rules, SettingStep) : null;
 

@@ -37,6 +37,7 @@ public sealed record FrozenCalculation(byte[] Package, byte[] Results, PdfFile S
             Program = ProgramVersion.Name,
             Package = package,
             Results = results,
+            Day = calculation.Day,
             Confirmed = confirmations.ToDictionary(c => c.ValueId, Sentence),
             IsPreliminary = title.IsPreliminary,
             IsDemonstration = title.IsDemonstration,

@@ -1,4 +1,5 @@
 using JointPlanner.Engine.Formulas;
+using JointPlanner.Exchange.Packages;
 
 namespace JointPlanner.Sheets;
 
@@ -27,6 +28,8 @@ public sealed record SheetFacts
     public required ReadOnlyMemory<byte> Package { get; init; }
     /// <summary>Stored text of the results.</summary>
     public required ReadOnlyMemory<byte> Results { get; init; }
+    /// <summary>What holds for every joint on the day of setting; null where no joint is set by this sheet.</summary>
+    public StoredDay? Day { get; init; }
     /// <summary>Values from memory that an owner confirmed: value id → sentence.</summary>
     public IReadOnlyDictionary<string, string> Confirmed { get; init; } = new Dictionary<string, string>();
     /// <summary>True for a print that may not be signed.</summary>

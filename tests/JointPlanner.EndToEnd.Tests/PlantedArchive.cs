@@ -16,7 +16,7 @@ namespace JointPlanner.EndToEnd.Tests;
 /// <summary>Issues a demo structure through the archive's own acts with results into which numbers were planted: what a page then shows can only come from there.</summary>
 internal static class PlantedArchive
 {
-    /// <summary>Freezes, accepts and issues the structure's first revision.</summary>
+    /// <summary>Freezes, accepts and issues the structure's draft; a new one is begun where there is none.</summary>
     /// <param name="site">The running site.</param>
     /// <param name="structure">Name of the structure.</param>
     /// <param name="plant">Changes the results before they are frozen.</param>
@@ -29,7 +29,13 @@ internal static class PlantedArchive
         var people = at.GetRequiredService<UserManager<Person>>();
         async Task<ActCall> By(string account) => ActCall.AtConsole((await people.FindByNameAsync(account))!.Id, TimeProvider.System.GetUtcNow());
         await using var scope = await ArchiveScope.Enter(archive, (await By("designer")).PersonId);
-        var revision = await scope.Revisions().SingleAsync(r => r.Structure!.Name == structure);
+        var revision = await Latest(scope, structure);
+        if (revision.State != RevisionState.Draft)
+        {
+            await at.GetRequiredService<BeginRevision>().Do(await By("designer"), new BeginRequest(revision.StructureId));
+            revision = await Latest(scope, structure);
+        }
+
         var organisation = await scope.Structures().Where(s => s.Id == revision.StructureId).Select(s => s.OrganisationId).SingleAsync();
         await at.GetRequiredService<OrganisationRegister>().SetRule(await By("owner"), organisation, new OwnerRule(IssuedBy.DesignerOrOwner, DesignerSignatureRequired: false, CheckerSignatureRequired: false));
 
@@ -45,4 +51,7 @@ internal static class PlantedArchive
         await at.GetRequiredService<IssueRevision>().Do(await By("owner"), new IssueRequest(revision.Id, new IssueFacts(document.Hash, [], [], [], [])));
         return (revision.StructureId, revision.Id);
     }
+
+    private static Task<Revision> Latest(ArchiveScope scope, string structure) =>
+        scope.Revisions().Include(r => r.States).Where(r => r.Structure!.Name == structure).OrderByDescending(r => r.Number).FirstAsync();
 }

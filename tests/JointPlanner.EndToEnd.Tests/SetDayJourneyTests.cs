@@ -22,7 +22,7 @@ public sealed class SetDayJourneyTests(RunningSite site) : IClassFixture<Running
         await issued.Owner.Page.SetViewportSizeAsync(1440, 1300);
         await issued.Owner.Go(issued.Structure);
         await issued.Owner.Page.WaitForSelectorAsync(".ledger-picture svg", new() { State = WaitForSelectorState.Attached });
-        await Picture(issued.Owner.Page, "ledger");
+        await site.Picture(issued.Owner.Page, "ledger", isForReadme: true);
 
         var contractor = await site.Visit("contractor", Width, Height);
         await contractor.Go(issued.Revision);
@@ -36,7 +36,7 @@ public sealed class SetDayJourneyTests(RunningSite site) : IClassFixture<Running
         await Assertions.Expect(contractor.Page.Locator(".big-tolerance")).ToContainTextAsync("tighter by at most");
         await Assertions.Expect(contractor.Page.Locator(".big-window")).ToContainTextAsync("window");
         await InOneThumbsReach(contractor.Page);
-        await Picture(contractor.Page, "set-day");
+        await site.Picture(contractor.Page, "set-day", isForReadme: true);
 
         var value = double.Parse((await set.InnerTextAsync()).Replace(" mm", "", StringComparison.Ordinal), CultureInfo.InvariantCulture);
         await contractor.Page.FillAsync("#now", (value + 4).ToString(CultureInfo.InvariantCulture));
@@ -82,13 +82,13 @@ public sealed class SetDayJourneyTests(RunningSite site) : IClassFixture<Running
         Assert.Empty(small);
     }
 
-    private static async Task NobodyIsShutOut(Visitor visitor)
+    private async Task NobodyIsShutOut(Visitor visitor)
     {
         Assert.Empty(await visitor.Barriers());
         await visitor.Page.ClickAsync("button:has-text('Dark')");
         await Assertions.Expect(visitor.Page.Locator("html")).ToHaveAttributeAsync("data-theme", "dark");
         Assert.Empty(await visitor.Barriers());
-        await Picture(visitor.Page, "set-day-dark", isForReadme: false);
+        await site.Picture(visitor.Page, "set-day-dark");
         await visitor.Page.ClickAsync("button:has-text('Dark')");
         var overflow = await visitor.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
         Assert.True(overflow <= 0, string.Create(CultureInfo.InvariantCulture, $"the page is {overflow} px wider than the screen"));
@@ -110,22 +110,5 @@ public sealed class SetDayJourneyTests(RunningSite site) : IClassFixture<Running
         // 0.55 · 13 + 0.45 · 11.5 = 12.325
         Assert.All(record.Points, p => Assert.Equal(("normal to the joint", 12.325, "contact thermometer, shaded faces", 1.5), (p.Direction, Math.Round(p.Temperature, 9), p.Method, p.Uncertainty)));
         Assert.Equal(["left kerb", "axis", "right kerb"], record.Points.OrderBy(p => p.Ordinal).Select(p => p.Place));
-    }
-
-    /// <summary>Pictures for the README, written where JOINTPLANNER_WRITE_PICTURES=1 asks for them.</summary>
-    private static async Task Picture(IPage page, string name, bool isForReadme = true)
-    {
-        if (Environment.GetEnvironmentVariable("JOINTPLANNER_WRITE_PICTURES") is not { Length: > 0 } wanted) return;
-        var folder = wanted == "1" ? ReadmePictures() : wanted;
-        if (!isForReadme && wanted == "1") return;
-        await page.EvaluateAsync("() => scrollTo(0, 0)");
-        await page.ScreenshotAsync(new() { Path = Path.Combine(folder, $"{name}.png") });
-    }
-
-    private static string ReadmePictures()
-    {
-        for (var folder = new DirectoryInfo(AppContext.BaseDirectory); folder is not null; folder = folder.Parent)
-            if (File.Exists(Path.Combine(folder.FullName, "JointPlanner.sln"))) return Directory.CreateDirectory(Path.Combine(folder.FullName, "deploy", "pictures")).FullName;
-        throw new DirectoryNotFoundException("No folder above the tests holds JointPlanner.sln.");
     }
 }

@@ -65,7 +65,47 @@ public sealed class SetDayPlantedTests(RunningSite site) : IClassFixture<Running
     }
 
     [Fact]
-    public async Task A_joint_that_is_not_there_and_a_structure_without_an_issue_say_so()
+    public async Task A_record_that_fails_is_kept_shown_and_accepted_with_a_reason_only_and_a_superseded_revision_sets_nothing()
+    {
+        var (structure, _) = await site.IssuePlanted("Sorrel Creek Crossing", _ => { });
+        var page = await Open(structure, "j1");
+        await page.FillAsync("#t-slab", "10");
+        await page.FillAsync("#t-girder", "10");
+        await page.FillAsync("#age", "90");
+        for (var point = 0; point < 3; point++) await page.FillAsync($"#opening-{point}", point == 1 ? "25" : "60");
+        await Assertions.Expect(page.Locator(".record-form .finding-stops")).ToContainTextAsync("axis: Carried to");
+        await page.ClickAsync("button:has-text('Record what was set')");
+        var record = page.Locator("article.record");
+        await Assertions.Expect(record.Locator(".state")).ToHaveTextAsync("fails, not accepted");
+        await Assertions.Expect(record.Locator(".finding-stops")).ToContainTextAsync("too narrow by");
+        await site.Picture(page, "set-day-fails");
+
+        var designer = await site.Visit("designer");
+        await designer.Go($"/structures/{structure}/joints/j1/set");
+        var own = designer.Page.Locator("article.record");
+        await own.Locator("button").ClickAsync();
+        await Assertions.Expect(own.GetByRole(AriaRole.Alert)).ToContainTextAsync("accepted only with a reason");
+        await own.Locator("textarea").FillAsync("The edge is ground back by 40 mm before the seal goes in.");
+        await own.Locator("button").ClickAsync();
+        await Assertions.Expect(own.Locator(".state")).ToHaveTextAsync("fails, accepted with a reason");
+        await Assertions.Expect(own).ToContainTextAsync("The edge is ground back");
+        await site.Picture(designer.Page, "set-day-desktop");
+        Assert.Empty(await designer.Barriers());
+        Assert.Empty(designer.Troubles);
+
+        await site.IssuePlanted("Sorrel Creek Crossing", _ => { });
+        await page.GotoAsync($"{site.Address}/structures/{structure}/joints/j1/set?revision=1");
+        await DoNotSet(page, "was superseded");
+        await Assertions.Expect(page.Locator(".big-why")).ToContainTextAsync("Revision 2 holds.");
+        await site.Picture(page, "set-day-superseded");
+        await page.GotoAsync($"{site.Address}/structures/{structure}/joints/j1/set");
+        await Assertions.Expect(page.Locator(".day-head")).ToContainTextAsync("Revision 2");
+        await Assertions.Expect(page.Locator(".big-why")).ToContainTextAsync("Enter the temperature");
+        await Assertions.Expect(page.Locator("article.record")).ToContainTextAsync("revision 1");
+    }
+
+    [Fact]
+    public async Task A_structure_that_is_not_open_to_the_person_is_not_there()
     {
         var visitor = await site.Visit("contractor", 390, 844);
         await visitor.Go($"/structures/{Guid.CreateVersion7()}/joints/j1/set");

@@ -38,6 +38,15 @@ public sealed class CalculationSheetTests
     }
 
     [Fact]
+    public void A_sheet_says_how_the_temperature_is_measured_on_the_day_and_how_long_it_may_be_used()
+    {
+        var text = Text(Calculate("sorrel-creek-crossing"), out _);
+        Assert.Contains("Σ w·T / Σ w over deck slab (w = 0.550), girder webs, shaded side (w = 0.450)", text, StringComparison.Ordinal);
+        Assert.Contains("later than 90 d after its issue", text, StringComparison.Ordinal);
+        Assert.Contains("contact thermometer, shaded faces", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_print_for_demonstration_says_so_on_every_page()
     {
         var facts = Facts(Calculate("plover-flats-bridge")) with { IsDemonstration = true };
@@ -62,6 +71,7 @@ public sealed class CalculationSheetTests
         Program = "test",
         Package = calculation.Package([]).ToUtf8(),
         Results = "{}"u8.ToArray(),
+        Day = calculation.Day,
         IsPreliminary = true,
     };
 

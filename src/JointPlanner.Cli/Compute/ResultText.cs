@@ -21,6 +21,7 @@ internal sealed class ResultText(Calculation calculation, DisplayProfile profile
             .Concat(Section("Defaults used, because nobody gave a value", calculation.Reading.Defaults.Select(d => $"  {d.Path} = {d.Text}: {d.Reason}")))
             .Concat(Section("Deck segments", Segments()))
             .Concat(result.Joints.SelectMany(j => Section(JointText.Title(j), joints.Lines(j))))
+            .Concat(Section("On the day of setting", Day()))
             .Concat(Section("Bearing travel from setting, up-station positive, without factors", Bearings()))
             .Concat(Section("Force of holding lines on the deck, up-station positive", Restraints()))
             .Concat(Section("Solved lengths and their checks by hand", HandChecks()))
@@ -52,6 +53,16 @@ internal sealed class ResultText(Calculation calculation, DisplayProfile profile
                 Say(s.Temperature.DoubtAllowance, Quantity.TemperatureDifference), Say(s.Temperature.Expansion, Quantity.Expansion),
                 s.ZeroMovementPoint is { } zero ? Say(zero, Quantity.Length) : "nowhere");
         return table.Lines("  ");
+    }
+
+    private IEnumerable<string> Day()
+    {
+        if (calculation.Day is not { } day) yield break;
+        yield return day.Points.IsEmpty
+            ? "  one mean temperature of the structure, found on site"
+            : $"  mean temperature, weighted: {string.Join(", ", day.Points.Select(p => $"{p.Name} {Say(p.Weight, Quantity.Ratio)}"))}";
+        foreach (var m in day.Methods) yield return $"  measured by {m.Name}: u(T) = {Say(m.TemperatureUncertainty, Quantity.TemperatureDifference)} ({m.Source})";
+        yield return $"  one table for each method, in steps of {Say(profile.DayStep, Quantity.TemperatureDifference)}, stands in results.json (--json); use within {Say(day.UseWithin, Quantity.Age)} of issue";
     }
 
     private IEnumerable<string> Bearings()

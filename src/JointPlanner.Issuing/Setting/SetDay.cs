@@ -22,7 +22,7 @@ public sealed record SetDay
     public DateTimeOffset? UseBefore { get; init; }
     /// <summary>Why nothing may be set by it, whatever the temperature; null where it may.</summary>
     public string? WhyNot { get; init; }
-    /// <summary>The joint as issued; null where nothing may be set by it.</summary>
+    /// <summary>The joint as issued; null where the revision has no table for it.</summary>
     public IssuedJoint? Joint { get; init; }
     /// <summary>True where the person may record what was set.</summary>
     public bool MayRecord { get; init; }

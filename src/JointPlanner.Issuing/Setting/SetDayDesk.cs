@@ -74,21 +74,21 @@ public sealed class SetDayDesk(IDbContextFactory<ArchiveContext> archive, Settin
     {
         var site = new SiteTime(day.Zone);
         var issuedAt = revision.States.First(s => s.State == RevisionState.Issued).At;
-        day = day with { Issued = issuedAt };
+        var package = await Package(scope, revision.Id);
+        var joint = package is { IsIntact: true } ? IssuedJoint.All(package.ResultsText).FirstOrDefault(j => j.Id == day.JointId) : null;
+        day = day with { Issued = issuedAt, Joint = joint };
         if (revision.State != RevisionState.Issued)
         {
             var last = revision.States.MaxBy(s => s.Ordinal)!;
             var instead = holding is { State: RevisionState.Issued } ? $" Revision {holding.Number} holds." : " Ask the designer which one holds.";
             return day with { WhyNot = $"Revision {revision.Number} was {Transitions.Words(revision.State)} on {site.Moment(last.At)}. {last.Reason}{instead}" };
         }
-        if (await Package(scope, revision.Id) is not { IsIntact: true } package) return day with { WhyNot = Altered };
-        var joint = IssuedJoint.All(package.ResultsText).FirstOrDefault(j => j.Id == day.JointId);
+        if (package is not { IsIntact: true }) return day with { WhyNot = Altered };
         if (joint is null) return day with { WhyNot = $"Revision {revision.Number} has no setting table for this joint. Ask the designer." };
         var until = joint.UseBefore(issuedAt);
         return day with
         {
             UseBefore = until,
-            Joint = joint,
             WhyNot = clock.GetUtcNow() <= until ? null
                 : $"Revision {revision.Number} was to be used before {site.Moment(until)}. Ask the designer whether it still holds, and for a fresh issue.",
         };

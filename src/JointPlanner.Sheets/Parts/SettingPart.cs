@@ -19,6 +19,7 @@ internal static class SettingPart
             yield return new Paragraph(Introduction(page, joint, joint.Table!));
             foreach (var age in joint.Table!.Ages) yield return TableAt(page, joint, age);
         }
+        if (page.Facts.Day is { } day) foreach (var block in DayPart.Of(page, day)) yield return block;
     }
 
     private static string Introduction(SheetPage page, JointResult joint, SettingTable table)
@@ -31,7 +32,7 @@ internal static class SettingPart
         var least = table.LeastAge is { } age ? $" Do not set below a deck age of {page.WithUnit(Quantity.Age, age)}." : "";
         return $"{direction} The normal opening changes by {k} (step {SheetPage.StepOf(table.Rate)}). " +
             $"Valid from {page.WithUnit(Quantity.Temperature, table.Min.Value)} to {page.WithUnit(Quantity.Temperature, table.Max.Value)} structure temperature.{least} " +
-            $"Skew {page.WithUnit(Quantity.Angle, joint.Joint.Skew)}: opening along the road = normal opening / cos β.";
+            $"Skew {page.WithUnit(Quantity.Angle, joint.Joint.Skew)}: the opening along the road is the normal one / cos β, rounded in its own direction.";
     }
 
     private static Table TableAt(SheetPage page, JointResult joint, double? age)
@@ -57,7 +58,7 @@ internal static class SettingPart
         return
         [
             t, least, Words.Strong(page.Opening(set.Value)), page.Opening(row.Minus!.Value.Value), page.Opening(row.Plus!.Value.Value), greatest,
-            page.Number(Quantity.Opening, set.Value / Math.Cos(joint.Joint.Skew)), row.ByGauge ? $"{by}; measure by gauge" : by,
+            row.Along is { } along ? page.Opening(along.Set.Value) : "measure normal", row.ByGauge ? $"{by}; measure by gauge" : by,
         ];
     }
 
