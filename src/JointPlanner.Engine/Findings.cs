@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Frames;
 using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Engine;
@@ -36,13 +37,31 @@ internal static class Findings
                     derivation.Note(new("setting-outside-range", Severity.Warning, $"joints/{joint.Id}/setting/temperature",
                         $"Joint {joint.Id} is expected to be set at {{0}}, outside the effective temperatures {{1}} to {{2}} of segment {segment.Id}.",
                         [(Quantity.Temperature, joint.SettingTemperature), (Quantity.Temperature, t.Min.Value), (Quantity.Temperature, t.Max.Value)]));
-        derivation.Note(new("model-axial", Severity.Note, "",
-            "The model is axial: supports do not tilt, backwalls move as their bearing level, level effects of rotation are not in it."));
+        if (plan.Segments.All(s => s.Section is null))
+            derivation.Note(new("model-axial", Severity.Note, "",
+                "The model is axial: supports do not tilt, backwalls move as their bearing level, level effects of rotation are not in it."));
+        else
+            foreach (var segment in plan.Segments.Where(s => s.Section is null))
+                derivation.Note(new("segment-axial", Severity.Note, $"segments/{segment.Id}",
+                    $"The section of segment {segment.Id} is not described: it changes its length in the model, but does not bend."));
         derivation.Note(new("basis-examples", Severity.Note, "basis/code", $"{basis.Title}: {basis.PublishedExamples}."));
     }
 
+    public static Finding NotHeld(MechanismException free) => free.Direction switch
+    {
+        Direction.Along => new("not-held", Severity.Error, "bearings",
+            "The deck can move along its axis at station {0} without resistance: nothing but sliding bearings holds it there. Fix one line or give it pads.",
+            [(Quantity.Length, free.Node.Station)]),
+        Direction.Vertical => new("not-carried", Severity.Error, "bearings",
+            $"Segment {free.Node.Body} can move up and down at station {{0}} without resistance. Give it a bearing line at each of its supports.",
+            [(Quantity.Length, free.Node.Station)]),
+        _ => new("not-carried", Severity.Error, "bearings",
+            $"Segment {free.Node.Body} can turn at station {{0}} without resistance. Give it a second bearing line, or build a column into it.",
+            [(Quantity.Length, free.Node.Station)]),
+    };
+
     private static int RigidLines(Plan plan, Segment segment) => plan.Bearings.Count(b =>
-        b.Segment == segment.Id && b.Kind == BearingKind.Fixed && plan.Supports.Any(s => s.Id == b.On && s.Stiffness is null));
+        b.Segment == segment.Id && b.Kind is BearingKind.Fixed or BearingKind.Monolithic && plan.Supports.Any(s => s.Id == b.On && s.Stiffness is null));
 
     private static double LargestForce(Plan plan, Segment segment, ImmutableArray<RestraintForce> restraints) => restraints
         .Where(r => plan.Bearings.Any(b => b.Id == r.Bearing && b.Segment == segment.Id))

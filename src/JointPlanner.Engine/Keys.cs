@@ -15,6 +15,11 @@ public static class Keys
     public static string TemperatureMin(string segment) => $"segment/{segment}/temperature/min";
     public static string ZeroMovementPoint(string segment) => $"segment/{segment}/zero-movement-point";
     public static string ZeroMovementPointByHand(string segment) => $"segment/{segment}/zero-movement-point/hand-check";
+    public static string SectionAxialStiffness(string segment) => $"segment/{segment}/section/axial-stiffness";
+    public static string NeutralAxis(string segment) => $"segment/{segment}/section/neutral-axis";
+    public static string SectionBendingStiffness(string segment) => $"segment/{segment}/section/bending-stiffness";
+    public static string EffectiveExpansion(string segment) => $"segment/{segment}/section/effective-expansion";
+    public static string ReliefMovement(string segment) => $"segment/{segment}/section/relief-movement";
     public static string ExpansionLength(string joint, string segment) => $"joint/{joint}/expansion-length/{segment}";
     public static string ExpansionLengthByHand(string joint, string segment) => $"joint/{joint}/expansion-length/{segment}/hand-check";
     public static string OpensBy(string joint, Cause cause) => $"joint/{joint}/opens-by/{Word(cause)}";

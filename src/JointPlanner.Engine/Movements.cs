@@ -6,6 +6,7 @@ using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Frames;
 using JointPlanner.Engine.HandChecks;
 using JointPlanner.Engine.Plans;
+using JointPlanner.Engine.Sections;
 
 namespace JointPlanner.Engine;
 
@@ -38,9 +39,7 @@ public sealed class Movements
         }
         catch (MechanismException free)
         {
-            movements.derivation.Note(new("not-held", Severity.Error, "bearings",
-                "The deck can move along its axis at station {0} without resistance: nothing but sliding bearings holds it there. Fix one line or give it pads.",
-                [(Quantity.Length, free.Node.Station)]));
+            movements.derivation.Note(Findings.NotHeld(free));
         }
         catch (NotFiniteException broken)
         {
@@ -54,7 +53,8 @@ public sealed class Movements
         var temperatures = plan.Segments.ToImmutableDictionary(s => s.Id, s => DeckTemperatures.Of(s, plan, basis, derivation));
         var lengths = ExpansionLengths.Of(plan, derivation);
         var segments = plan.Segments.Select(s => new SegmentResult(s, temperatures[s.Id],
-            ZeroMovementPoints.Of(s, lengths, id => temperatures[id].Expansion.Value, derivation))).ToImmutableArray();
+            ZeroMovementPoints.Of(s, lengths, id => temperatures[id].Expansion.Value, derivation),
+            SectionResult.Of(plan, lengths.Deck.SectionOf(s.Id), temperatures[s.Id], derivation))).ToImmutableArray();
         var checks = new HandCheckedLengths(plan, lengths.Deck, derivation);
 
         var joints = new List<JointResult>();

@@ -8,6 +8,7 @@ using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Frames;
 using JointPlanner.Engine.HandChecks;
 using JointPlanner.Engine.Plans;
+using JointPlanner.Engine.Sections;
 
 namespace JointPlanner.Engine;
 
@@ -49,7 +50,8 @@ public sealed record Result
 /// <param name="Segment">The segment.</param>
 /// <param name="Temperature">Temperatures and coefficient of expansion.</param>
 /// <param name="ZeroMovementPoint">Station, m; null where every point moves.</param>
-public sealed record SegmentResult(Segment Segment, SegmentTemperature Temperature, Number? ZeroMovementPoint);
+/// <param name="Section">What its section is and does; null where it is not described.</param>
+public sealed record SegmentResult(Segment Segment, SegmentTemperature Temperature, Number? ZeroMovementPoint, SectionResult? Section);
 
 /// <summary>One joint: what moves it, what fits it, how it is set.</summary>
 /// <param name="Joint">The joint.</param>
@@ -70,9 +72,9 @@ public sealed record JointResult(
 /// <param name="Cold">At the lowest temperature with all shortening.</param>
 public sealed record RestraintForce(string Bearing, Number Hot, Number Cold);
 
-/// <summary>The axial model as solved: enough to type it into any frame program.</summary>
+/// <summary>The frame as solved: enough to type it into any frame program.</summary>
 /// <param name="Model">Nodes, members, springs.</param>
 /// <param name="Residual">Largest out-of-balance of all states, relative to the largest load.</param>
 /// <param name="PivotRatio">Smallest pivot relative to its diagonal entry.</param>
 /// <param name="RefinementChange">Largest change by one refinement step, relative.</param>
-public sealed record ModelListing(AxialModel Model, double Residual, double PivotRatio, double RefinementChange);
+public sealed record ModelListing(FrameModel Model, double Residual, double PivotRatio, double RefinementChange);

@@ -22,7 +22,7 @@ internal static class RestraintForces
             var hot = ForceOn(bearing, id => temperatureOf(id).Expansion.Value * (temperatureOf(id).Max.Value - set));
             var cold = ForceOn(bearing, id =>
                 (temperatureOf(id).Expansion.Value * (temperatureOf(id).Min.Value - set)) - ShorteningOf(plan.SegmentOf(id), bearing.SettingAge ?? 0));
-            var scale = plan.SegmentOf(bearing.Segment).AxialStiffness * 1e-4;
+            var scale = lengths.Deck.AxialStiffnessOf(plan.SegmentOf(bearing.Segment)) * 1e-4;
             if (Math.Max(Math.Abs(hot.Force), Math.Abs(cold.Force)) < Negligible * scale) continue;
             forces.Add(new RestraintForce(bearing.Id,
                 Solved(bearing, "hot", "warmed to the highest temperature", hot), Solved(bearing, "cold", "cooled to the lowest temperature, all shortening over", cold)));
@@ -33,15 +33,15 @@ internal static class RestraintForces
         {
             var solution = lengths.Solver.Strained(strainOf);
             var node = lengths.Deck.DeckAt(bearing.Segment, bearing.Station);
-            var members = lengths.Deck.Model.Members.Where(m => m.Segment == bearing.Segment).ToArray();
-            var below = members.Where(m => m.To == node).Sum(m => AxialSolver.ForceIn(m, solution, strainOf(m.Segment)));
-            var ahead = members.Where(m => m.From == node).Sum(m => AxialSolver.ForceIn(m, solution, strainOf(m.Segment)));
+            var members = lengths.Deck.Model.Members.Where(m => m.Body == bearing.Segment).ToArray();
+            var below = members.Where(m => m.To == node).Sum(m => solution.ForceIn(m, strainOf(m.Body)));
+            var ahead = members.Where(m => m.From == node).Sum(m => solution.ForceIn(m, strainOf(m.Body)));
             return (below - ahead, solution.Residual);
         }
 
         Number Solved(BearingLine bearing, string end, string state, (double Force, double Residual) found) => derivation.Solved(
             Keys.RestraintForce(bearing.Id, end), "F", $"force of bearing line {bearing.Id} on the deck, up-station, {state}", Quantity.Force,
-            found.Force, "axial model of the deck", found.Residual, [.. lengths.Deck.Inputs]);
+            found.Force, FrameWords.Name, found.Residual, [.. lengths.Deck.Inputs]);
     }
 
     private static double ShorteningOf(Segment segment, double age) => Remaining(segment.Creep, age) + Remaining(segment.Shrinkage, age);

@@ -13,6 +13,7 @@ internal static class Arithmetic
     public static double Root(double value) => Math.Sqrt(value);
     public static double Cos(double angle) => Math.Cos(angle);
     public static double Sin(double angle) => Math.Sin(angle);
+    public static double Tanh(double value) => Math.Tanh(value);
     public static double Larger(double a, double b) => Math.Max(a, b);
     public static double Smaller(double a, double b) => Math.Min(a, b);
 

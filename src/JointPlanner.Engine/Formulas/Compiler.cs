@@ -38,6 +38,7 @@ internal static class Compiler
             Function { Name: "√" } f => Call(nameof(Arithmetic.Root), Visit(f.Argument)),
             Function { Name: "cos" } f => Call(nameof(Arithmetic.Cos), Visit(f.Argument)),
             Function { Name: "sin" } f => Call(nameof(Arithmetic.Sin), Visit(f.Argument)),
+            Function { Name: "tanh" } f => Call(nameof(Arithmetic.Tanh), Visit(f.Argument)),
             Extreme x => Call(x.IsLarger ? nameof(Arithmetic.Larger) : nameof(Arithmetic.Smaller), Visit(x.Left), Visit(x.Right)),
             Aggregate a => Call(a.Kind.ToString(), values, Tree.Constant(IndexOf(a.Each))),
             Rounded r => Call(nameof(Arithmetic.RoundTo), Visit(r.Value), Visit(r.Step), Tree.Constant(r.Rounding)),

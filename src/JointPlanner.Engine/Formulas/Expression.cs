@@ -59,6 +59,8 @@ public abstract record Expression
     public static Expression Cos(Expression angle) => new Function("cos", angle, Dimension.None);
     /// <summary>Sine of an angle in radians.</summary>
     public static Expression Sin(Expression angle) => new Function("sin", angle, Dimension.None);
+    /// <summary>Hyperbolic tangent of a plain number.</summary>
+    public static Expression Tanh(Expression value) => new Function("tanh", value, Dimension.None);
     /// <summary>The larger of two values.</summary>
     public static Expression Larger(Expression a, Expression b) => new Extreme(true, a, b);
     /// <summary>The smaller of two values.</summary>
@@ -99,7 +101,7 @@ public sealed record Binary(char Sign, Expression Left, Expression Right)
 /// <summary>A whole power.</summary>
 public sealed record Powered(Expression Base, int Exponent) : Expression(Base.Dimension.Power(Exponent));
 
-/// <summary>Square root, sine or cosine.</summary>
+/// <summary>Square root, sine, cosine or hyperbolic tangent.</summary>
 public sealed record Function(string Name, Expression Argument, Dimension Result) : Expression(Dimensions.ArgumentOf(Name, Argument, Result));
 
 /// <summary>The larger or smaller of two values.</summary>

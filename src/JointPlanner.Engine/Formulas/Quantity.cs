@@ -74,6 +74,25 @@ public sealed class Quantity
     /// <summary>A flexibility, m/N.</summary>
     public static readonly Quantity Flexibility = new("flexibility", Metre / Newton);
 
+    /// <summary>A load per length of deck, or a longitudinal shear per length, N/m.</summary>
+    public static readonly Quantity LineLoad = new("line-load", Newton / Metre);
+    /// <summary>A moment, N·m.</summary>
+    public static readonly Quantity Moment = new("moment", Newton * Metre);
+    /// <summary>A bending stiffness EI, N·m².</summary>
+    public static readonly Quantity BendingStiffness = new("bending-stiffness", Newton * Metre.Power(2));
+    /// <summary>A curvature, 1/m: change of rotation per length, positive when the underside lengthens.</summary>
+    public static readonly Quantity Curvature = new("curvature", Metre.Power(-1));
+    /// <summary>A rotation of deck, pier or bearing, rad, positive when the deck rises up-station.</summary>
+    public static readonly Quantity Rotation = new("rotation", Dimension.None);
+    /// <summary>A change of temperature per depth, K/m.</summary>
+    public static readonly Quantity TemperatureGradient = new("temperature-gradient", new(-1, 0, 0, 1));
+    /// <summary>An axial stiffness times a coefficient of expansion, N/K: force per degree of a fully held section.</summary>
+    public static readonly Quantity StiffnessPerDegree = new("stiffness-per-degree", new(1, 1, -2, -1));
+    /// <summary>A force per length of deck for a unit of slip, N/m².</summary>
+    public static readonly Quantity ConnectionStiffness = new("connection-stiffness", Newton / Metre.Power(2));
+    /// <summary>A movement for a unit of load per length, m²/N.</summary>
+    public static readonly Quantity InfluenceArea = new("influence-area", Metre.Power(2) / Newton);
+
     /// <inheritdoc/>
     public override string ToString() => Id;
 }

@@ -79,5 +79,21 @@ public sealed record Unit(string Name, Dimension Dimension, double Factor, doubl
     public static readonly Unit Year = new("a", new(0, 0, 1), 365.25 * 86400);
     public static readonly Unit MillimetrePerKilonewton = new("mm/kN", L1 / N, 1e-6);
     public static readonly Unit InchPerKip = new("in/kip", L1 / N, Inch / (1000 * PoundForce));
+    public static readonly Unit NewtonMetre = new("N·m", N * L1, 1);
+    public static readonly Unit KilonewtonMetre = new("kN·m", N * L1, 1e3);
+    public static readonly Unit MeganewtonMetre = new("MN·m", N * L1, 1e6);
+    public static readonly Unit KipFoot = new("kip·ft", N * L1, 1000 * PoundForce * 12 * Inch);
+    public static readonly Unit KilonewtonSquareMetre = new("kN·m²", N * L2, 1e3);
+    public static readonly Unit MeganewtonSquareMetre = new("MN·m²", N * L2, 1e6);
+    public static readonly Unit KipSquareFoot = new("kip·ft²", N * L2, 1000 * PoundForce * 144 * Inch * Inch);
+    public static readonly Unit PerMetre = new("/m", Dimension.None / L1, 1);
+    public static readonly Unit PerFoot = new("/ft", Dimension.None / L1, 1 / (12 * Inch));
+    public static readonly Unit KelvinPerMetre = new("K/m", Theta / L1, 1);
+    public static readonly Unit FahrenheitPerFoot = new("°F/ft", Theta / L1, 5.0 / 9 / (12 * Inch));
+    public static readonly Unit KilonewtonPerKelvin = new("kN/K", N / Theta, 1e3);
+    public static readonly Unit KipPerFahrenheit = new("kip/°F", N / Theta, 1000 * PoundForce * 1.8);
+    public static readonly Unit MeganewtonPerSquareMetre = new("MN/m²", N / L2, 1e6);
+    public static readonly Unit MillimetrePerKilonewtonPerMetre = new("mm/(kN/m)", L2 / N, 1e-6);
+    public static readonly Unit InchPerKipPerFoot = new("in/(kip/ft)", L2 / N, Inch * 12 * Inch / (1000 * PoundForce));
 #pragma warning restore CS1591
 }

@@ -15,9 +15,9 @@ public sealed class ExpansionLengths
 
     private readonly Plan plan;
     private readonly Derivation derivation;
-    private readonly ImmutableDictionary<string, AxialSolution> unitStrains;
+    private readonly ImmutableDictionary<string, FrameSolution> unitStrains;
 
-    private ExpansionLengths(Plan plan, DeckModel deck, AxialSolver solver, Derivation derivation)
+    private ExpansionLengths(Plan plan, DeckModel deck, FrameSolver solver, Derivation derivation)
     {
         (this.plan, Deck, Solver, this.derivation) = (plan, deck, solver, derivation);
         unitStrains = plan.Segments.ToImmutableDictionary(s => s.Id, s => solver.Strained(id => id == s.Id ? 1 : 0));
@@ -27,7 +27,7 @@ public sealed class ExpansionLengths
     public DeckModel Deck { get; }
 
     /// <summary>The factorised model.</summary>
-    public AxialSolver Solver { get; }
+    public FrameSolver Solver { get; }
 
     /// <summary>Largest residual of all states solved.</summary>
     public double Residual => unitStrains.Values.Select(s => s.Residual).DefaultIfEmpty(0).Max();
@@ -40,38 +40,31 @@ public sealed class ExpansionLengths
     public static ExpansionLengths Of(Plan plan, Derivation derivation)
     {
         var deck = DeckModel.Of(plan, derivation);
-        return new ExpansionLengths(plan, deck, new AxialSolver(deck.Model), derivation);
+        return new ExpansionLengths(plan, deck, new FrameSolver(deck.Model), derivation);
     }
 
-    /// <summary>By how much a joint closes when a segment lengthens by a unit strain, for each segment that moves it; m.</summary>
-    public ImmutableArray<(Segment Segment, Number Length)> Of(Joint joint) =>
-        Lengths(s => Face(joint.Near, true, s) - Face(joint.Far, false, s),
-            s => Keys.ExpansionLength(joint.Id, s), s => $"expansion length of joint {joint.Id} for segment {s}: closing per unit strain");
+    /// <summary>By how much a joint closes at road-surface level when a segment lengthens by a unit strain, for each segment that moves it; m.</summary>
+    public ImmutableArray<(Segment Segment, Number Length)> Of(Joint joint)
+    {
+        var closing = Deck.Closing(joint);
+        return Lengths(s => s.Of(closing), s => Keys.ExpansionLength(joint.Id, s), s => $"expansion length of joint {joint.Id} for segment {s}: closing per unit strain");
+    }
 
     /// <summary>By how much the deck moves up-station over a bearing line when a segment lengthens by a unit strain; m.</summary>
-    public ImmutableArray<(Segment Segment, Number Length)> Of(BearingLine bearing) =>
-        Lengths(s => s.Of(Deck.DeckAt(bearing.Segment, bearing.Station)) - s.Of(Below(bearing)),
-            _ => "", s => $"expansion length of bearing line {bearing.Id} for segment {s}: travel up-station per unit strain");
-
-    /// <summary>Displacement of a joint's face, positive up-station.</summary>
-    private double Face(string body, bool isNear, AxialSolution solution) =>
-        plan.Segments.FirstOrDefault(s => s.Id == body) is { } segment
-            ? solution.Of(Deck.DeckAt(body, isNear ? segment.End : segment.Start))
-            : solution.Of(Deck.SupportAt(body));
-
-    private Node Below(BearingLine bearing) => plan.Supports.Any(s => s.Id == bearing.On)
-        ? Deck.SupportAt(bearing.On)
-        : Deck.DeckAt(bearing.On, bearing.Station);
-
+    public ImmutableArray<(Segment Segment, Number Length)> Of(BearingLine bearing)
+    {
+        var travel = Deck.Travel(bearing);
+        return Lengths(s => s.Of(travel), _ => "", s => $"expansion length of bearing line {bearing.Id} for segment {s}: travel up-station per unit strain");
+    }
 
     private ImmutableArray<(Segment, Number)> Lengths(
-        Func<AxialSolution, double> movement, Func<string, string> key, Func<string, string> meaning) =>
+        Func<FrameSolution, double> movement, Func<string, string> key, Func<string, string> meaning) =>
     [
         .. plan.Segments
             .Select(s => (Segment: s, Value: movement(unitStrains[s.Id])))
             .Where(p => Math.Abs(p.Value) > Negligible * p.Segment.Length)
             .Select(p => (p.Segment, derivation.Solved(
-                key(p.Segment.Id), "L", meaning(p.Segment.Id), Quantity.Length, p.Value, "axial model of the deck",
+                key(p.Segment.Id), "L", meaning(p.Segment.Id), Quantity.Length, p.Value, FrameWords.Name,
                 unitStrains[p.Segment.Id].Residual, [.. Deck.Inputs]))),
     ];
 }

@@ -43,6 +43,23 @@ public sealed class SkylineMatrix
         return y;
     }
 
+    /// <summary>Row by row the sum of the sizes of the terms of K·x: what an out-of-balance is measured against.</summary>
+    public double[] SizesOfTerms(double[] x)
+    {
+        var y = new double[Size];
+        for (var j = 0; j < Size; j++)
+        {
+            for (var i = tops[j]; i < j; i++)
+            {
+                var k = Math.Abs(columns[j][i - tops[j]]);
+                y[i] += k * Math.Abs(x[j]);
+                y[j] += k * Math.Abs(x[i]);
+            }
+            y[j] += Math.Abs(columns[j][j - tops[j]] * x[j]);
+        }
+        return y;
+    }
+
     /// <summary>The factorisation. The matrix itself is left as it is, so that residuals are measured against it.</summary>
     public SkylineFactor Factor()
     {

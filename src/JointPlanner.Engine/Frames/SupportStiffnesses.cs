@@ -36,6 +36,19 @@ public static class SupportStiffnesses
         "support.stiffness", "k", "stiffness of the support along the deck at bearing level", Quantity.Stiffness, [Part],
         1 / Total(Part), Cantilever, new(5e7, 1, "own arithmetic", 1e-8, 1e-8));
 
+    /// <summary>Figures of a column that is built into the deck and so is a member of the frame.</summary>
+    public static IEnumerable<Number> ColumnInputs(Support support, ColumnStiffness column, Derivation derivation)
+    {
+        var path = $"supports/{support.Id}/column";
+        yield return derivation.Given($"{path}/height", "h", Height.Meaning, Quantity.Length, column.Height);
+        yield return derivation.Given($"{path}/modulus", "E", Modulus.Meaning, Quantity.Stress, column.Modulus);
+        yield return derivation.Given($"{path}/inertia", "I", Inertia.Meaning, Quantity.Inertia, column.Inertia);
+        if (column.FoundationAlong is { } along)
+            yield return derivation.Given($"{path}/foundation-along", "K_h", Along.Meaning, Quantity.Stiffness, along);
+        if (column.FoundationTurning is { } turning)
+            yield return derivation.Given($"{path}/foundation-turning", "K_θ", Turning.Meaning, Quantity.RotationalStiffness, turning);
+    }
+
     /// <summary>Stiffness as a step; null for an unyielding support.</summary>
     public static Number? Of(Support support, Plan plan, Derivation derivation)
     {

@@ -14,13 +14,13 @@ public static class ZeroMovementPoints
     public static Number? Of(Segment segment, ExpansionLengths lengths, Func<string, double> expansionOf, Derivation derivation)
     {
         var warmed = lengths.Solver.Strained(expansionOf);
-        foreach (var member in lengths.Deck.Model.Members.Where(m => m.Segment == segment.Id))
+        foreach (var member in lengths.Deck.Model.Members.Where(m => m.Body == segment.Id))
         {
             var (from, to) = (warmed.Of(member.From), warmed.Of(member.To));
             if (from * to > 0 || from == to) continue;
             var station = member.From.Station + (member.Length * from / (from - to));
             return derivation.Solved(Keys.ZeroMovementPoint(segment.Id), "x_0", $"zero-movement point of segment {segment.Id} while the deck warms",
-                Quantity.Length, station, "axial model of the deck", warmed.Residual, [.. lengths.Deck.Inputs]);
+                Quantity.Length, station, FrameWords.Name, warmed.Residual, [.. lengths.Deck.Inputs]);
         }
         return null;
     }

@@ -56,6 +56,7 @@ public sealed class DeckByHand
         var lines = plan.Bearings.Where(b => b.Segment == segment.Id && b.Kind != BearingKind.Free).ToArray();
         if (plan.Bearings.Any(b => b.Kind != BearingKind.Free && (b.On == segment.Id || (b.Segment == segment.Id && plan.Segments.Any(s => s.Id == b.On)))))
             return None("the segment is tied to another segment");
+        if (lines.Any(b => b.Kind == BearingKind.Monolithic)) return None("a column is built into the segment");
         var unyielding = lines.Where(b => b.Kind == BearingKind.Fixed && supportStiffness(b.On) is null).ToArray();
         if (unyielding.Length > 1) return None("more than one unyielding line holds the segment");
         if (unyielding.Length == 1) return GivenValues.Station(plan, unyielding[0], derivation);

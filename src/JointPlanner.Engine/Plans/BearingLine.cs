@@ -9,6 +9,8 @@ public enum BearingKind
     Free,
     /// <summary>Shears: stiffness G·A/T_e per pad.</summary>
     Elastomeric,
+    /// <summary>No bearing: a column is built into the deck.</summary>
+    Monolithic,
 }
 
 /// <summary>The bearings of one segment on one support, acting in parallel, or on a segment that carries it.</summary>
@@ -26,6 +28,8 @@ public sealed record BearingLine
     public required double Station { get; init; }
     /// <summary>What it does along the deck.</summary>
     public required BearingKind Kind { get; init; }
+    /// <summary>Depth of the line's own level below the top of the section, m; null for that of the section.</summary>
+    public double? Depth { get; init; }
     /// <summary>The pads of an elastomeric line; null for others.</summary>
     public Pads? Pads { get; init; }
     /// <summary>Temperature at which upper and lower parts were tied at zero shear, °C; null: as the joints (steel decks only).</summary>

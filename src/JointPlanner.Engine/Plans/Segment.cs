@@ -30,6 +30,8 @@ public sealed record Segment
     public double Depth { get; init; }
     /// <summary>Axial stiffness EA, N.</summary>
     public required double AxialStiffness { get; init; }
+    /// <summary>Cross-section; null where only EA is known, and then the segment does not bend in the model.</summary>
+    public CrossSection? Section { get; init; }
     /// <summary>Coefficient of thermal expansion for length, 1/K; null for the basis's value.</summary>
     public double? Expansion { get; init; }
     /// <summary>Creep of the whole deck; null where it does not creep.</summary>

@@ -42,7 +42,7 @@ public sealed class SkylineMatrixTests
             matrix.Add(j, j, 5);
             matrix.Add(i, j, -5);
         }
-        Assert.True(matrix.Factor().PivotRatio < AxialSolver.MechanismRatio);
+        Assert.True(matrix.Factor().PivotRatio < FrameSolver.MechanismRatio);
     }
 
     /// <summary>A symmetric matrix made positive definite by a dominant diagonal.</summary>

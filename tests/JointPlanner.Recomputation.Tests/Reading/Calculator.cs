@@ -111,6 +111,7 @@ public sealed partial class Calculator
             return new(Math.Sqrt(under.Value), under.Powers.Half());
         }
         if (Takes("cos(")) return new(Math.Cos(Plain(Closed(Sum()))), default);
+        if (Takes("tanh(")) return new(Math.Tanh(Plain(Closed(Sum()))), default);
         if (Takes("sin(")) return new(Math.Sin(Plain(Closed(Sum()))), default);
         if (Takes("max(")) return Extreme(Arguments(), Math.Max);
         if (Takes("min(")) return Extreme(Arguments(), Math.Min);

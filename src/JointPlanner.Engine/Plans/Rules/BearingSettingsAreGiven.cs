@@ -29,6 +29,7 @@ public sealed class BearingSettingsAreGiven : PlanRule
     {
         if (deck is { Kind: not DeckKind.Concrete, Creep: null, Shrinkage: null }) return false;
         // A single fixed line neither travels nor shares its restraint.
+        if (bearing.Kind == BearingKind.Monolithic) return false;
         return bearing.Kind != BearingKind.Fixed || plan.Bearings.Count(b => b.Segment == deck.Id && b.Kind == BearingKind.Fixed) > 1;
     }
 }
