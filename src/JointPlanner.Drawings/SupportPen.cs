@@ -79,6 +79,7 @@ internal sealed class SupportPen(Plan plan, ElevationFrame frame, double letter)
                 new Box(Role.Bearing, new(x - half, soffit, half * 2, bearing), Stroke.Medium, Fill.Paper),
                 .. Enumerable.Range(1, 3).Select(i => new Line(Role.Bearing, new(x - half, soffit + (bearing * i / 4)), new(x + half, soffit + (bearing * i / 4)), Stroke.Thin)),
             ],
+            BearingKind.Monolithic => [new Box(Role.Bearing, new(x - (half * 0.5), soffit, half, bearing), Stroke.Medium, Fill.Ink)],
             _ => throw new InvalidOperationException($"There is no kind of bearing {line.Kind}."),
         };
     }

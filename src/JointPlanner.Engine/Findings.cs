@@ -3,6 +3,7 @@ using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Frames;
+using JointPlanner.Engine.HandChecks;
 using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Engine;
@@ -11,7 +12,7 @@ namespace JointPlanner.Engine;
 internal static class Findings
 {
     public static void Note(
-        Plan plan, CodeBasis basis, ImmutableDictionary<string, SegmentTemperature> temperatures, HandCheckedLengths checks,
+        Plan plan, CodeBasis basis, ImmutableDictionary<string, SegmentTemperature> temperatures, ImmutableArray<HandCheck> checks,
         ImmutableArray<SegmentResult> segments, ImmutableArray<RestraintForce> restraints, Derivation derivation)
     {
         foreach (var bearing in plan.Bearings.Where(b => b.Kind == BearingKind.Free))
@@ -20,10 +21,10 @@ internal static class Findings
         foreach (var segment in segments.Where(s => s.ZeroMovementPoint is null))
             derivation.Note(new("no-zero-movement-point", Severity.Note, $"segments/{segment.Segment.Id}",
                 $"No point of segment {segment.Segment.Id} stands still while the deck warms: it is carried along by what holds it."));
-        foreach (var check in checks.All.Where(c => !c.Agrees))
+        foreach (var check in checks.Where(c => !c.Agrees))
             derivation.Note(new("hand-check-outside-band", Severity.Warning, check.Path,
                 $"The {check.What} is {{0}} as solved and {{1}} by hand, further apart than {{2}}: {check.Reason}.",
-                [(Quantity.Length, check.Solved.Value), (Quantity.Length, check.ByHand!.Value.Value), (Quantity.Length, check.Band)]));
+                [(check.Quantity, check.Solved.Value), (check.Quantity, check.ByHand!.Value.Value), (check.Quantity, check.Band)]));
         foreach (var segment in plan.Segments.Where(s => RigidLines(plan, s) > 1))
             derivation.Note(new("restrained-by-several-lines", Severity.Warning, $"segments/{segment.Id}",
                 $"More than one unyielding line holds segment {segment.Id}; the restraint force reaches {{0}}.",

@@ -13,10 +13,10 @@ namespace JointPlanner.Engine;
 internal sealed class JointCalculation(Plan plan, CodeBasis basis, Owner? owner, CountingTable counting, Derivation derivation)
 {
     public JointResult Of(
-        Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf)
+        Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf, ImmutableArray<OtherPart> byFrame)
     {
         var set = SettingState(joint);
-        var demands = new JointDemands(plan, joint, lengths, temperatureOf);
+        var demands = new JointDemands(plan, joint, lengths, temperatureOf, byFrame);
         var demand = demands.At(null, derivation);
         var movements = JointMovements.Of(demand, set, derivation);
         var missing = IncludedCauses.Missing(plan, joint, [.. lengths.Select(l => l.Segment)], counting);

@@ -26,6 +26,7 @@ public static class Keys
     public static string ClosesBy(string joint, Cause cause) => $"joint/{joint}/closes-by/{Word(cause)}";
     public static string Part(string joint, string segment, Cause cause) => $"joint/{joint}/part/{segment}/{Word(cause)}";
     public static string Travel(string bearing, Cause cause, string end) => $"bearing/{bearing}/travel/{Word(cause)}/{end}";
+    public static string Rotation(string bearing, Cause cause, string end) => $"bearing/{bearing}/rotation/{Word(cause)}/{end}";
     public static string TravelTotal(string bearing, string end) => $"bearing/{bearing}/travel/total/{end}";
     public static string RestraintForce(string bearing, string end) => $"bearing/{bearing}/restraint-force/{end}";
     public static string CountedClosing(string joint, Occasion occasion, Column column) => $"joint/{joint}/{Word(occasion)}/closes-by/{Word(column)}";

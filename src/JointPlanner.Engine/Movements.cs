@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Causes;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Combining;
 using JointPlanner.Engine.Formulas;
@@ -55,20 +56,26 @@ public sealed class Movements
         var segments = plan.Segments.Select(s => new SegmentResult(s, temperatures[s.Id],
             ZeroMovementPoints.Of(s, lengths, id => temperatures[id].Expansion.Value, derivation),
             SectionResult.Of(plan, lengths.Deck.SectionOf(s.Id), temperatures[s.Id], derivation))).ToImmutableArray();
+        temperatures = segments.ToImmutableDictionary(s => s.Segment.Id, s => s.Temperature with { BestEstimate = s.Section?.EffectiveExpansion });
+        var causes = new FrameCauses(plan, basis, lengths, id => temperatures[id], derivation);
         var checks = new HandCheckedLengths(plan, lengths.Deck, derivation);
+
+        var (byHand, rotations) = (new HandCheckedRotations(plan, lengths.Deck, causes, derivation), new List<HandCheck>());
 
         var joints = new List<JointResult>();
         foreach (var joint in plan.Joints)
         {
             cancellation.ThrowIfCancellationRequested();
+            var byFrame = causes.Of(joint);
+            rotations.AddRange(byHand.Of(joint, byFrame));
             joints.Add(new JointCalculation(plan, basis, owner, counting, derivation)
-                .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id]));
+                .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id], byFrame));
         }
         var bearings = plan.Bearings
             .Select(b => BearingTravels.Of(plan, b, lengths.Of(b), id => temperatures[id], SettingTemperatures.Of(b, plan), derivation))
             .OfType<BearingTravel>().ToImmutableArray();
         var restraints = RestraintForces.Of(plan, lengths, id => temperatures[id], derivation);
-        Findings.Note(plan, basis, temperatures, checks, segments, restraints, derivation);
+        Findings.Note(plan, basis, temperatures, [.. checks.All, .. rotations], segments, restraints, derivation);
 
         return Unfinished(counting) with
         {
@@ -76,8 +83,10 @@ public sealed class Movements
             Joints = [.. joints],
             Bearings = bearings,
             Restraints = restraints,
-            HandChecks = checks.All,
-            Model = new ModelListing(lengths.Deck.Model, lengths.Residual, lengths.Solver.PivotRatio, lengths.RefinementChange),
+            BearingMovements = BearingMovements.Of(plan, lengths.Deck, causes, derivation),
+            Gradients = [.. causes.Gradients.Select(g => (g.Segment.Id, g.Warm, g.Cool))],
+            HandChecks = [.. checks.All, .. rotations],
+            Model = new ModelListing(lengths.Deck.Model, Math.Max(lengths.Residual, causes.Residual), lengths.Solver.PivotRatio, lengths.RefinementChange),
             MemoryValues = MemoryValues.Of(derivation.Steps, counting, joints, owner?.Rules),
         };
     }

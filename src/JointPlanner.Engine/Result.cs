@@ -25,6 +25,10 @@ public sealed record Result
     public ImmutableArray<JointResult> Joints { get; init; } = [];
     /// <summary>Travel of the bearing lines over which the deck moves.</summary>
     public ImmutableArray<BearingTravel> Bearings { get; init; } = [];
+    /// <summary>What each cause computed by the frame does to each bearing line.</summary>
+    public ImmutableArray<BearingMovement> BearingMovements { get; init; } = [];
+    /// <summary>Sections under vertical temperature differences, warmer above and cooler above.</summary>
+    public ImmutableArray<(string Segment, SectionState Warm, SectionState Cool)> Gradients { get; init; } = [];
     /// <summary>Force by which each holding line holds the deck; empty where nothing restrains it.</summary>
     public ImmutableArray<RestraintForce> Restraints { get; init; } = [];
     /// <summary>The solved model; null where it could not be solved.</summary>

@@ -34,7 +34,9 @@ public abstract class BasisSpecification
         {
             Ask($"temperature {kind}", Basis.UniformTemperature(kind, Answerable, derivation));
             Ask($"expansion {kind}", Basis.ExpansionCoefficient(kind, derivation));
+            Ask($"temperature difference {kind}", Basis.TemperatureDifference(Sections.Of(kind, derivation), derivation));
         }
+        Ask("live load", Basis.LiveLoad(Traffic, derivation));
         foreach (var doubt in Basis.Doubts.Where(d => d != SettingDoubt.None)) Ask($"doubt {doubt}", Basis.DoubtAllowance(doubt, derivation));
         Ask("safety degrees", Basis.SafetyDegrees(derivation));
         var counting = Basis.Counting(Basis.SafetyFormats[0]);
@@ -52,7 +54,9 @@ public abstract class BasisSpecification
             Basis.UniformTemperature(kind, Answerable, derivation);
             Basis.ExpansionCoefficient(kind, derivation);
             Basis.SingleGapLimits(kind, kind, derivation);
+            Basis.TemperatureDifference(Sections.Of(kind, derivation), derivation);
         }
+        Basis.LiveLoad(Traffic, derivation);
         Basis.ModularGapLimits(derivation);
         Basis.SafetyDegrees(derivation);
         var sources = derivation.Steps.Select(s => s.Origin).OfType<TableOrigin>().Select(o => o.Source)
@@ -81,6 +85,8 @@ public abstract class BasisSpecification
             }
         Assert.Equal(Enum.GetValues<DeckKind>().Length, compared);
     }
+
+    protected static LiveLoad Traffic { get; } = new() { StandsFor = FrameShare.WholeWidth, Lanes = 2, Carriageway = 8 };
 
     protected static Plan PlanWith(string code, Climate climate, string profile = "") => new()
     {

@@ -20,9 +20,11 @@ internal sealed class ResultText(Calculation calculation, DisplayProfile profile
         return Head()
             .Concat(Section("Defaults used, because nobody gave a value", calculation.Reading.Defaults.Select(d => $"  {d.Path} = {d.Text}: {d.Reason}")))
             .Concat(Section("Deck segments", Segments()))
+            .Concat(Section("Cross-sections", SectionText.Lines(result, profile)))
             .Concat(result.Joints.SelectMany(j => Section(JointText.Title(j), joints.Lines(j))))
             .Concat(Section("On the day of setting", Day()))
             .Concat(Section("Bearing travel from setting, up-station positive, without factors", Bearings()))
+            .Concat(Section("Bearings under other causes, travel up-station and rotation rising up-station positive, without factors", BearingCauses()))
             .Concat(Section("Force of holding lines on the deck, up-station positive", Restraints()))
             .Concat(Section("Solved lengths and their checks by hand", HandChecks()))
             .Concat(Section("Findings", Findings()))
@@ -79,6 +81,16 @@ internal sealed class ResultText(Calculation calculation, DisplayProfile profile
         return table.Lines("  ");
     }
 
+    private IEnumerable<string> BearingCauses()
+    {
+        if (result.BearingMovements.IsEmpty) return [];
+        var table = new TextTable("line", "cause", "#travel, most", "#travel, least", "#rotation, most", "#rotation, least");
+        foreach (var b in result.BearingMovements)
+            table.Add(b.Bearing, Words.Of(b.Cause), Say(b.TravelMost, Quantity.Movement), Say(b.TravelLeast, Quantity.Movement),
+                b.RotationMost is { } most ? Say(most, Quantity.Rotation) : "", b.RotationLeast is { } least ? Say(least, Quantity.Rotation) : "");
+        return table.Lines("  ");
+    }
+
     private IEnumerable<string> Restraints()
     {
         if (result.Restraints.IsEmpty) return [];
@@ -88,8 +100,8 @@ internal sealed class ResultText(Calculation calculation, DisplayProfile profile
     }
 
     private IEnumerable<string> HandChecks() => result.HandChecks.Select(c => c.ByHand is { } hand
-        ? $"  {c.What}: solved {Say(c.Solved, Quantity.Length)}, by hand {Say(hand, Quantity.Length)}, {(c.Agrees ? "within" : "NOT within")} {Say(c.Band, Quantity.Length)}"
-        : $"  {c.What}: solved {Say(c.Solved, Quantity.Length)}, no check by hand: {c.Reason}");
+        ? $"  {c.What}: solved {Say(c.Solved, c.Quantity)}, by hand {Say(hand, c.Quantity)}, {(c.Agrees ? "within" : "NOT within")} {Say(c.Band, c.Quantity)}"
+        : $"  {c.What}: solved {Say(c.Solved, c.Quantity)}, no check by hand: {c.Reason}");
 
     private IEnumerable<string> Findings() => result.Findings.OrderByDescending(f => f.Severity)
         .Select(f => $"  {FindingText.Of(f.Severity)}{(f.Path.Length > 0 ? $" ({f.Path})" : "")}: {FindingText.Of(f, profile)}");

@@ -1,6 +1,7 @@
 using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
+using JointPlanner.Engine.Sections;
 using static JointPlanner.Engine.Bases.Cause;
 using static JointPlanner.Engine.Bases.Column;
 
@@ -53,6 +54,12 @@ public sealed class AashtoLrfd7UsBasis : CodeBasis
     };
 
     /// <inheritdoc/>
+    public override Answer<TemperatureDifferences> TemperatureDifference(SectionProperties section, Derivation derivation) => TemperatureGradients.Of(section, derivation);
+
+    /// <inheritdoc/>
+    public override Answer<LoadModel> LiveLoad(LiveLoad traffic, Derivation derivation) => Hl93.Of(traffic, derivation);
+
+    /// <inheritdoc/>
     public override CountingTable Counting(SafetyFormat format)
     {
         var movement = new Provenance(Mark.Seen, "Colorado DOT Bridge Design Manual, Appendix A Example 5", "Jan 2018",
@@ -67,7 +74,10 @@ public sealed class AashtoLrfd7UsBasis : CodeBasis
         foreach (var cause in new[] { Creep, Shrinkage })
             foreach (var column in new[] { GapService, GapStrength, SealRange, Racking, BearingTravel })
                 table = table.With(cause, column, new Counted(1.0) { Source = shortening });
-        return table;
+        // γ_TG: none at strength; in service 1.0 without live load, the larger of its two values.
+        var gradient = Memory("Table 3.4.1-1, γ_TG", "aashto-lrfd-7-us/gamma-tg");
+        return table.With(Cause.TemperatureDifference, GapStrength, new NotCounted { Source = gradient })
+            .With(Cause.TemperatureDifference, GapService, new Counted(1.0) { Source = gradient });
     }
 
     /// <inheritdoc/>

@@ -1,6 +1,7 @@
 using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
+using JointPlanner.Engine.Sections;
 using static JointPlanner.Engine.Bases.Cause;
 using static JointPlanner.Engine.Bases.Column;
 
@@ -50,6 +51,12 @@ public sealed class En1991Part1To5Basis : CodeBasis
             new Provenance(Mark.Memory, "EN 1993-2", "2006", "Annex A", "en-1991-1-5-2003/safety-degrees"), "all decks");
 
     /// <inheritdoc/>
+    public override Answer<TemperatureDifferences> TemperatureDifference(SectionProperties section, Derivation derivation) => LinearDifferences.Of(section, derivation);
+
+    /// <inheritdoc/>
+    public override Answer<LoadModel> LiveLoad(LiveLoad traffic, Derivation derivation) => LoadModel1.Of(traffic, derivation);
+
+    /// <inheritdoc/>
     public override CountingTable Counting(SafetyFormat format)
     {
         var partial = new Provenance(Mark.Seen, "an open-source finite-element library restating EN 1990 Annex A2", "", "γ_Q thermal, set B");
@@ -63,7 +70,16 @@ public sealed class En1991Part1To5Basis : CodeBasis
         foreach (var cause in new[] { Creep, Shrinkage })
             foreach (var column in new[] { GapService, GapStrength, SealRange, Racking, BearingTravel })
                 table = table.With(cause, column, new Counted(1.0) { Source = permanent });
-        return table;
+        // 6.1.5: ω_M on the difference beside the full uniform part; the other combination governs only where the difference moves the joint more.
+        var together = Memory("6.1.5: ω_M = 0.75 beside the full uniform part", "en-1991-1-5-2003/omega-m");
+        foreach (var column in new[] { GapService, SealRange, Racking, BearingTravel, BearingRotation })
+            table = table.With(Cause.TemperatureDifference, column, new Counted(0.75) { Source = together });
+        table = table.With(Cause.TemperatureDifference, GapStrength, new Counted(0.75 * strength) { Source = together });
+        var settlement = new Provenance(Mark.Seen, "an open-source finite-element library restating EN 1990 Annex A2", "", "settlement, linear analysis, set B");
+        foreach (var cause in new[] { DeadLoad, Substructure })
+            foreach (var column in new[] { GapService, SealRange, Racking, BearingTravel, BearingRotation })
+                table = table.With(cause, column, new Counted(1.0) { Source = permanent });
+        return table.With(Substructure, GapStrength, new Counted(1.2) { Source = settlement });
     }
 
     /// <inheritdoc/>

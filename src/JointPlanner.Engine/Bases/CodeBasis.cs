@@ -1,5 +1,6 @@
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
+using JointPlanner.Engine.Sections;
 
 namespace JointPlanner.Engine.Bases;
 
@@ -38,6 +39,14 @@ public abstract class CodeBasis
 
     /// <summary>Safety degrees on both ends, K, for the format in degrees.</summary>
     public virtual Answer<Number> SafetyDegrees(Derivation derivation) => Silence<Number>();
+
+    /// <summary>Vertical temperature differences of a deck, for movements: profiles over its depth, each step noted in the derivation.</summary>
+    /// <param name="section">The deck's section; its segment says which zone, surface and shape.</param>
+    /// <param name="derivation">Where the steps go.</param>
+    public virtual Answer<TemperatureDifferences> TemperatureDifference(SectionProperties section, Derivation derivation) => Silence<TemperatureDifferences>();
+
+    /// <summary>Traffic loads on what one frame stands for.</summary>
+    public virtual Answer<LoadModel> LiveLoad(LiveLoad traffic, Derivation derivation) => Silence<LoadModel>();
 
     /// <summary>How each cause counts in each judgement under a safety format.</summary>
     public virtual CountingTable Counting(SafetyFormat format) => CountingTable.Empty;

@@ -7,6 +7,7 @@ namespace JointPlanner.Engine.Causes;
 public static class UniformTemperature
 {
     private static readonly Operand Alpha = new("α", "coefficient of thermal expansion", Quantity.Expansion);
+    private static readonly Operand Estimate = new("α_eff", "best estimate of the coefficient of expansion of the whole section", Quantity.Expansion);
     private static readonly Operand Length = new("L", "expansion length of the joint for this segment", Quantity.Length);
     private static readonly Operand PerDegree = new("r", "movement per degree, closing when warmer", Quantity.Rate);
     private static readonly Operand Set = new("T_set", "structure temperature at setting", Quantity.Temperature);
@@ -23,6 +24,12 @@ public static class UniformTemperature
     public static readonly Formula Rate = new(
         "thermal.rate", "r", "movement of the joint per degree along the deck, closing when warmer", Quantity.Rate, [Alpha, Length],
         Alpha * Length, Bar, new(0.72e-3, 1e-9, "own arithmetic: 60 m at 12e-6 per K", 12e-6, 60));
+
+    /// <summary>Coefficient for the slope of the window.</summary>
+    public static readonly Formula WindowExpansion = new(
+        "thermal.window-expansion", "α_w", "coefficient of expansion for the slope of the window: the larger of the basis's and the best estimate", Quantity.Expansion,
+        [Alpha, Estimate], Larger(Alpha, Estimate), Provenance.Derived("on the day the deck moves as it is, so the larger of both is allowed for"),
+        new(12e-6, 1e-12, "own arithmetic", 12e-6, 10.4e-6));
 
     /// <summary>Opening by cooling from setting; negative where cooling closes.</summary>
     public static readonly Formula Cooling = new(

@@ -11,7 +11,11 @@ namespace JointPlanner.Engine.Climates;
 /// <param name="Max">Highest, with safety degrees, °C.</param>
 /// <param name="DoubtAllowance">Allowance on both ends when sizing before the day, K.</param>
 /// <param name="Expansion">Coefficient of thermal expansion for length, 1/K.</param>
-public sealed record SegmentTemperature(string Segment, Number Min, Number Max, Number DoubtAllowance, Number Expansion);
+public sealed record SegmentTemperature(string Segment, Number Min, Number Max, Number DoubtAllowance, Number Expansion)
+{
+    /// <summary>Best estimate of the coefficient of the whole section, from its layers, 1/K; null where they say nothing of it.</summary>
+    public Number? BestEstimate { get; init; }
+}
 
 /// <summary>Asks the basis for the temperatures of each segment.</summary>
 public static class DeckTemperatures

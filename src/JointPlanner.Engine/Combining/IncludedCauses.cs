@@ -14,7 +14,7 @@ public static class IncludedCauses
     {
         var given = plan.GivenMovements.Where(m => m.Joint == joint.Id).Select(m => m.Cause).ToHashSet();
         return [.. Enum.GetValues<Cause>().Where(c =>
-            !given.Contains(c) && MayAct(c, plan, moving) && !IsComputed(c, moving) && !IsLeftOut(c, counting))];
+            !given.Contains(c) && MayAct(c, plan, moving) && !IsComputed(c, moving) && !ComputedCauses.ByFrame(plan, joint, c) && !IsLeftOut(c, counting))];
     }
 
     private static bool IsLeftOut(Cause cause, CountingTable counting) => GapColumns.All(c => counting[cause, c] is NotCounted);

@@ -30,11 +30,18 @@ public sealed class JointDemands
     private readonly Joint joint;
     private readonly ImmutableArray<(Segment Segment, Number Length)> lengths;
     private readonly Func<string, SegmentTemperature> temperatureOf;
+    private readonly ImmutableArray<OtherPart> byFrame;
 
     /// <summary>Demands of one joint.</summary>
+    /// <param name="plan">The plan.</param>
+    /// <param name="joint">The joint.</param>
+    /// <param name="lengths">Its expansion lengths.</param>
+    /// <param name="temperatureOf">Temperatures of a segment.</param>
+    /// <param name="byFrame">What the causes computed by the frame do to it.</param>
     public JointDemands(
-        Plan plan, Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf) =>
-        (this.plan, this.joint, this.lengths, this.temperatureOf) = (plan, joint, lengths, temperatureOf);
+        Plan plan, Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf,
+        ImmutableArray<OtherPart> byFrame) =>
+        (this.plan, this.joint, this.lengths, this.temperatureOf, this.byFrame) = (plan, joint, lengths, temperatureOf, byFrame);
 
     /// <summary>The demand at a deck age at setting; null for the age that the joint's setting state gives.</summary>
     public JointDemand At(double? deckAge, Derivation derivation)
@@ -46,7 +53,7 @@ public sealed class JointDemands
             Joint = joint,
             DeckAge = deckAge ?? SettingAge,
             Thermal = [.. lengths.Select(l => Thermal(l.Segment, l.Length, derivation))],
-            Others = [.. Shortenings(deckAge, derivation), .. Given(derivation)],
+            Others = [.. Shortenings(deckAge, derivation), .. byFrame, .. Given(derivation)],
             CosSkew = derivation.Use(Cosine, "", skew),
             SinSkew = derivation.Use(SineOfSkew, "", skew),
         };
@@ -59,7 +66,10 @@ public sealed class JointDemands
     {
         var t = temperatureOf(segment.Id);
         var rate = derivation.Use(UniformTemperature.Rate, "", t.Expansion, length);
-        return new ThermalPart(segment.Id, rate, rate, t.Min, t.Max, t.DoubtAllowance);
+        var window = t.BestEstimate is { } best && best.Value > t.Expansion.Value
+            ? derivation.Use(UniformTemperature.Rate, "", derivation.Use(UniformTemperature.WindowExpansion, "", t.Expansion, best), length)
+            : rate;
+        return new ThermalPart(segment.Id, rate, window, t.Min, t.Max, t.DoubtAllowance);
     }
 
     private IEnumerable<OtherPart> Shortenings(double? deckAge, Derivation derivation)

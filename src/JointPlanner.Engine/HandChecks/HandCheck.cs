@@ -11,6 +11,9 @@ namespace JointPlanner.Engine.HandChecks;
 /// <param name="Reason">Why they may differ, or why no elementary formula applies.</param>
 public sealed record HandCheck(string What, string Path, Number Solved, Number? ByHand, double Band, string Reason)
 {
+    /// <summary>Kind of the value.</summary>
+    public Quantity Quantity { get; init; } = Quantity.Length;
+
     /// <summary>True when there is no elementary value or it agrees within the band.</summary>
     public bool Agrees => ByHand is not { } hand || Math.Abs(hand.Value - Solved.Value) <= Band;
 }

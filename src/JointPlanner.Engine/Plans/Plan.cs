@@ -24,6 +24,8 @@ public sealed record Plan
     public required ImmutableArray<Joint> Joints { get; init; }
     /// <summary>Movements of causes that are given rather than computed.</summary>
     public ImmutableArray<GivenMovement> GivenMovements { get; init; } = [];
+    /// <summary>Traffic; null where nothing is said of it.</summary>
+    public LiveLoad? LiveLoad { get; init; }
     /// <summary>What the setting table shall cover.</summary>
     public SettingTableRequest SettingTable { get; init; } = new();
     /// <summary>How the temperature is found on the day of setting.</summary>

@@ -38,6 +38,12 @@ public sealed record Segment
     public Shortening? Creep { get; init; }
     /// <summary>Shrinkage; null where it does not shrink.</summary>
     public Shortening? Shrinkage { get; init; }
+    /// <summary>Vertical temperature difference; null where it is not described.</summary>
+    public Gradient? Gradient { get; init; }
+    /// <summary>Dead load still to come after setting; null where nothing is said of it.</summary>
+    public DeadLoadToCome? DeadLoad { get; init; }
+    /// <summary>Braking force on the segment; null where none is given.</summary>
+    public BrakingForce? Braking { get; init; }
     /// <summary>Length, m.</summary>
     public double Length => End - Start;
 }

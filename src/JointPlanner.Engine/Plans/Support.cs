@@ -24,6 +24,8 @@ public sealed record Support
     public required SupportKind Kind { get; init; }
     /// <summary>How it yields along the deck; null for unyielding.</summary>
     public SupportStiffness? Stiffness { get; init; }
+    /// <summary>Movement still to come after setting; null where nothing is said of it.</summary>
+    public SubstructureMovement? Movement { get; init; }
     /// <summary>Height for the drawing, m; null where not given.</summary>
     public double? Height { get; init; }
 }

@@ -14,6 +14,15 @@ namespace JointPlanner.Engine.Sections;
 public sealed record SectionResult(
     SectionProperties Properties, Number? EffectiveExpansion, SectionState? PerDegree, ImmutableArray<Interaction> Interactions, Number? ReliefMovement)
 {
+    /// <summary>Every number of it, so that a sheet can print how each came about.</summary>
+    public IEnumerable<Number> Numbers =>
+    [
+        Properties.AxialStiffness, Properties.NeutralAxis, Properties.BendingStiffness,
+        .. new[] { EffectiveExpansion, ReliefMovement }.OfType<Number>(),
+        .. Interactions.SelectMany(i => new Number?[] { i.State.AxialStrain, i.State.Curvature, i.Force, i.EndSlip, i.EndShearFlow }).OfType<Number>(),
+        .. Interactions.SelectMany(i => i.State.Stresses).Select(s => s.Stress),
+    ];
+
     /// <summary>The section's result; null where it is not described.</summary>
     public static SectionResult? Of(Plan plan, SectionProperties? section, SegmentTemperature temperature, Derivation derivation)
     {

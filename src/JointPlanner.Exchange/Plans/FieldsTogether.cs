@@ -18,6 +18,7 @@ internal sealed class FieldsTogether
         check.SharedIds();
         check.References();
         foreach (var path in values.Items("supports")) check.OneStiffness(path);
+        foreach (var path in values.Items("segments")) check.OneAxialStiffness(path);
         foreach (var path in values.Items("bearings")) check.StationOnSegment(path);
         check.Answers();
         check.BasisWords(known);
@@ -58,6 +59,13 @@ internal sealed class FieldsTogether
         if (document.Has($"{path}/stiffness") && values.HasGroup($"{path}/column"))
             Add(new("supports.two-stiffnesses", $"{path}/stiffness", document.TextAt($"{path}/stiffness") ?? "", "Both a stiffness and a column are given.",
                 "Allowed: one of the two.", "Take one of them out."));
+    }
+
+    private void OneAxialStiffness(string path)
+    {
+        if (document.Has($"{path}/axial-stiffness") && values.HasGroup($"{path}/section"))
+            Add(new("segments.two-stiffnesses", $"{path}/axial-stiffness", document.TextAt($"{path}/axial-stiffness") ?? "", "Both an axial stiffness and a section are given.",
+                "Allowed: one of the two.", "Take one of them out; the section gives the axial stiffness too."));
     }
 
     private void StationOnSegment(string path)

@@ -28,6 +28,11 @@ public static class PlanFields
     private static readonly QuantityEntry Strain = new(Quantity.Strain, new("0 µε", "5000 µε")) { Usual = new("0 µε", "1500 µε") };
     private static readonly QuantityEntry GivenMovement = new(Quantity.Movement, new("0 mm", "5 m")) { Usual = new("0 mm", "1 m") };
     private static readonly RatioEntry Factor = new(0, 10);
+    private static readonly QuantityEntry Level = new(Quantity.Size, new("0 mm", "30 m")) { Usual = new("0 mm", "12 m") };
+    private static readonly QuantityEntry GroundMovement = new(Quantity.Movement, new("-5 m", "5 m")) { Usual = new("-200 mm", "200 mm") };
+    private static readonly QuantityEntry LineLoad = new(Quantity.LineLoad, new("-1000 kN/m", "1000 kN/m")) { Usual = new("0 kN/m", "300 kN/m") };
+    private static readonly QuantityEntry Difference = new(Quantity.TemperatureDifference, new("-60 K", "60 K")) { Usual = new("-30 K", "40 K") };
+    private static readonly QuantityEntry OwnForce = new(Quantity.Force, new("0 kN", "100 MN")) { Usual = new("0 kN", "5 MN") };
 
     private static Field Group(string pattern, string name, string meaning, bool isRequired = false, bool isAlwaysThere = false) =>
         new(pattern, name, new GroupEntry { IsAlwaysThere = isAlwaysThere }, meaning) { IsRequired = isRequired };
@@ -62,6 +67,13 @@ public static class PlanFields
             new QuantityEntry(Quantity.TemperatureDifference, new("0 K", "20 K")) { Usual = new("0.2 K", "8 K") },
             "One standard deviation of the mean temperature so measured.", "2 K"),
         Needed($"{pattern}/*/source", "source of the uncertainty", new TextEntry(Note), "Where the uncertainty comes from."),
+    ];
+
+    private static IEnumerable<Field> Profile(string word, string name) =>
+    [
+        Maybe($"segments/*/gradient/{word}", $"profile, {name}", new ListEntry(0, 20, "point of the profile"), $"Temperature difference over the depth while the deck is {name}, from the top down."),
+        Needed($"segments/*/gradient/{word}/*/depth", "depth", Level, "Below the top of the section.", "100 mm"),
+        Needed($"segments/*/gradient/{word}/*/difference", "difference", Difference, "Above the uniform part of the temperature.", "10 K"),
     ];
 
     /// <summary>The table.</summary>
@@ -122,6 +134,13 @@ public static class PlanFields
             "Unyielding where nothing is given.", "900 MN/m"),
         Maybe("supports/*/column/foundation-turning", "foundation stiffness against turning",
             new QuantityEntry(Quantity.RotationalStiffness, new("1e-3 MN·m/rad", "1e9 MN·m/rad")), "Unyielding where nothing is given.", "9000 MN·m/rad"),
+        Group("supports/*/movement", "movement of the support", "What of its movement is still to come after joints and bearings are set; leave out where nothing is known of it."),
+        Default("supports/*/movement/settlement", "settlement", GroundMovement, "Downward positive.", "0 mm", "no settlement is given", "10 mm"),
+        Default("supports/*/movement/along", "movement along the deck", GroundMovement,
+            "Of bearing level, positive up-station: translation, pavement and embankment push.", "0 mm", "no movement along is given", "-8 mm"),
+        Default("supports/*/movement/tilt", "tilt", new QuantityEntry(Quantity.Rotation, new("-0.1 rad", "0.1 rad")) { Usual = new("-0.01 rad", "0.01 rad") },
+            "About bearing level, positive when the support leans up-station.", "0 rad", "no tilt is given", "0.001 rad"),
+        Needed("supports/*/movement/source", "source of the support's movement", new TextEntry(Note), "Where it comes from."),
         Maybe("supports/*/height", "height for the drawing", Height, "Height of the support on the drawing.", "9 m"),
 
         new("segments", "deck segments", new ListEntry(1, 2000, "deck segment") { WhyFewest = "The deck is empty: there is no segment." },
@@ -139,6 +158,43 @@ public static class PlanFields
         Maybe("segments/*/expansion", "coefficient of expansion",
             new QuantityEntry(Quantity.Expansion, new("1e-6 /K", "40e-6 /K")) { Usual = new("6e-6 /K", "14e-6 /K") },
             "For length; the basis's value where nothing is given.", "10e-6 /K"),
+        Group("segments/*/section", "cross-section", "Layers of the section, instead of giving EA; the deck then bends in the model and its levels count."),
+        Needed("segments/*/section/depth", "depth of the section", new QuantityEntry(Quantity.Size, new("50 mm", "30 m")) { Usual = new("200 mm", "12 m") },
+            "From the top of the uppermost layer, without surfacing, to the soffit.", "1750 mm"),
+        Maybe("segments/*/section/bearing-depth", "depth of bearing level", new QuantityEntry(Quantity.Size, new("0 mm", "35 m")),
+            "Where bearings turn and slide, below the top of the section; the soffit where nothing is given.", "1800 mm"),
+        Default("segments/*/section/surfacing", "surfacing", new QuantityEntry(Quantity.Size, new("0 mm", "2 m")) { Usual = new("0 mm", "300 mm") },
+            "Height of the road surface above the top of the section.", "0 mm", "no surfacing is given", "90 mm"),
+        Maybe("segments/*/section/connection", "stiffness of the connection", new QuantityEntry(Quantity.ConnectionStiffness, new("1e-3 MN/m²", "1e6 MN/m²")),
+            "Between slab and steel: force per length of deck for a unit of slip.", "1000 MN/m2"),
+        Default("segments/*/section/relief-spacing", "spacing of relief joints", new QuantityEntry(Quantity.Length, new("0.5 m", "500 m")) { Usual = new("2 m", "100 m") },
+            "Of a slab that is carried by its steel without acting with it.", "50 ft", "common practice, no source: small relief joints about every 50 ft", "50 ft"),
+        new("segments/*/section/layers", "layers", new ListEntry(1, 60, "layer") { WhyFewest = "The section is empty: there is no layer." }, "Layers that act together.") { IsRequired = true },
+        Needed("segments/*/section/layers/*/id", "id", new IdEntry(), "Short name within the section, for instance slab."),
+        Needed("segments/*/section/layers/*/material", "material of the layer", new WordEntry(["concrete", "steel"]), "What it is made of."),
+        Needed("segments/*/section/layers/*/modulus", "modulus of the layer", new QuantityEntry(Quantity.Stress, new("100 MPa", "1000 GPa")) { Usual = new("5 GPa", "250 GPa") },
+            "Modulus of elasticity, short-term.", "34 GPa"),
+        Needed("segments/*/section/layers/*/area", "area of the layer", new QuantityEntry(Quantity.Area, new("1e-6 m²", "1000 m²")), "Area of the layer, of all girders that the frame stands for.", "0.625 m2"),
+        Needed("segments/*/section/layers/*/depth", "depth of the layer", Level, "Of its centroid below the top of the section.", "125 mm"),
+        Maybe("segments/*/section/layers/*/height", "height of the layer", new QuantityEntry(Quantity.Size, new("0.1 mm", "30 m")), "Of a layer of uniform width.", "250 mm"),
+        Maybe("segments/*/section/layers/*/inertia", "second moment of area of the layer", new QuantityEntry(Quantity.Inertia, new("1e-12 m⁴", "1e6 m⁴")),
+            "About its own centroid, instead of a height.", "0.0126 m4"),
+        Maybe("segments/*/section/layers/*/expansion", "coefficient of expansion of the layer",
+            new QuantityEntry(Quantity.Expansion, new("1e-6 /K", "40e-6 /K")) { Usual = new("6e-6 /K", "14e-6 /K") },
+            "Best estimate for this layer; that of the segment where nothing is given.", "10e-6 /K"),
+        Group("segments/*/gradient", "temperature difference", "Vertical temperature difference, where it is computed; profiles given here, or else those of the basis."),
+        Maybe("segments/*/gradient/zone", "zone of solar warming", new WordEntry(["1", "2", "3", "4"]), "Where the basis asks for one."),
+        Default("segments/*/gradient/surface", "surface of the deck", new WordEntry(["bare", "waterproofed", "surfaced"]), "As the basis asks for it.", "surfaced", "nothing is said of the surface"),
+        Default("segments/*/gradient/shape", "shape of a concrete deck", new WordEntry(["box", "beams-or-slab"]), "As the basis asks for it.", "beams-or-slab", "nothing is said of the shape"),
+        .. Profile("warm", "warmer above"),
+        .. Profile("cool", "cooler above"),
+        Maybe("segments/*/gradient/source", "source of the profiles", new TextEntry(Note), "Where given profiles come from."),
+        Group("segments/*/dead-load", "dead load still to come", "What is placed after the joint is set: surfacing, barriers."),
+        Needed("segments/*/dead-load/load", "dead load", LineLoad, "Per length of deck, downward positive; zero where none is to come.", "18 kN/m"),
+        Needed("segments/*/dead-load/source", "source of the dead load", new TextEntry(Note), "Where it comes from."),
+        Group("segments/*/braking", "braking", "Braking force on the segment, where its movement is computed."),
+        Needed("segments/*/braking/force", "braking force", OwnForce, "At road-surface level, on the whole segment; it acts either way.", "450 kN"),
+        Needed("segments/*/braking/source", "source of the braking force", new TextEntry(Note), "Where it comes from."),
         .. Shortening("creep", "creep"),
         .. Shortening("shrinkage", "shrinkage"),
 
@@ -149,7 +205,9 @@ public static class PlanFields
         Needed("bearings/*/segment", "segment carried", new ReferenceEntry(["segments"]), "The segment that the line carries."),
         Needed("bearings/*/on", "what it stands on", new ReferenceEntry(["supports", "segments"]), "The support, or the segment that carries this one."),
         Maybe("bearings/*/station", "station of the bearing line", Station, "The support's station where nothing is given; needed on a carrying segment.", "128 m"),
-        Needed("bearings/*/kind", "kind of bearing", new WordEntry(["fixed", "free", "elastomeric"]), "What the line does along the deck."),
+        Needed("bearings/*/kind", "kind of bearing", new WordEntry(["fixed", "free", "elastomeric", "monolithic"]), "What the line does along the deck."),
+        Maybe("bearings/*/depth", "depth of the bearing line", new QuantityEntry(Quantity.Size, new("0 mm", "35 m")),
+            "Its own level below the top of the section, for instance of a half joint; that of the section where nothing is given.", "900 mm"),
         Group("bearings/*/pads", "pads", "The pads of an elastomeric line."),
         Needed("bearings/*/pads/count", "number of pads", new CountEntry(1, 500), "Pads in the line."),
         Needed("bearings/*/pads/shear-modulus", "shear modulus", new QuantityEntry(Quantity.Stress, new("0.05 MPa", "20 MPa")) { Usual = new("0.4 MPa", "2 MPa") },
@@ -193,6 +251,23 @@ public static class PlanFields
         Needed("movements/*/opens-by", "opens by", GivenMovement, "How far it opens the joint along the deck.", "1.5 mm"),
         Needed("movements/*/closes-by", "closes by", GivenMovement, "How far it closes the joint along the deck.", "2.5 mm"),
         Needed("movements/*/source", "source of the movement", new TextEntry(Note), "Where it comes from, or why none acts."),
+
+        Group("live-load", "live load", "Traffic, where its movements are computed."),
+        Needed("live-load/stands-for", "what the frame stands for", new WordEntry(["whole-width", "girder-line"]), "The whole width with all its lanes, or one girder line with its share of them."),
+        Maybe("live-load/lanes", "number of lanes", new CountEntry(1, 20), "Traffic lanes that the deck can hold.", "2"),
+        Maybe("live-load/carriageway", "width of the carriageway", new QuantityEntry(Quantity.Length, new("2 m", "60 m")), "Between kerbs, where the basis makes lanes of it.", "8 m"),
+        Maybe("live-load/distribution", "distribution factor", new RatioEntry(0.01, 10), "Lanes that one girder line takes; no default.", "0.7"),
+        Maybe("live-load/distribution-source", "source of the distribution factor", new TextEntry(Note), "Where it comes from."),
+        Group("live-load/own", "own loads", "Loads of one lane, instead of those of the basis."),
+        Maybe("live-load/own/trains", "trains of axles", new ListEntry(0, 40, "train"), "The worst of them counts."),
+        Needed("live-load/own/trains/*/id", "id", new IdEntry(), "Short name in this file."),
+        new("live-load/own/trains/*/axles", "axles", new ListEntry(1, 40, "axle") { WhyFewest = "The train has no axle." }, "From the first axle on.") { IsRequired = true },
+        Needed("live-load/own/trains/*/axles/*/force", "axle load", OwnForce, "Force of the axle.", "145 kN"),
+        Maybe("live-load/own/trains/*/axles/*/spacing", "axle spacing", new QuantityEntry(Quantity.Length, new("0.1 m", "200 m")), "Behind the axle before it; none for the first.", "4.3 m"),
+        Maybe("live-load/own/trains/*/axles/*/spacing-most", "largest axle spacing", new QuantityEntry(Quantity.Length, new("0.1 m", "200 m")), "Where the spacing varies.", "9 m"),
+        Default("live-load/own/uniform", "uniform load", LineLoad, "Per length, on adverse lengths.", "0 kN/m", "no uniform load is given", "9.3 kN/m"),
+        Default("live-load/own/dynamic", "dynamic factor", new RatioEntry(1, 3), "On the trains alone.", "1", "no dynamic factor is given", "1.33"),
+        Needed("live-load/own/source", "source of the loads", new TextEntry(Note), "Where they come from."),
 
         Group("setting-table", "setting table", "Rows of the setting table.", isAlwaysThere: true),
         Maybe("setting-table/from", "lowest temperature of the table", Effective, "The lowest effective temperature where nothing is given.", "-10 °C"),

@@ -32,6 +32,7 @@ internal sealed class PlanMaking
             Supports = supports,
             Segments = segments,
             Bearings = bearings,
+            LiveLoad = values.HasGroup("live-load") ? LoadMaking.LiveLoad(values) : null,
             Joints = Items("joints", Joint),
             GivenMovements = Items("movements", (path, id) => new GivenMovement(id, values.Text($"{path}/joint"), Word<Cause>($"{path}/cause"),
                 values.Number($"{path}/opens-by"), values.Number($"{path}/closes-by"), values.Text($"{path}/source"))),
@@ -95,6 +96,7 @@ internal sealed class PlanMaking
             Station = values.Number($"{path}/station"),
             Kind = Word<SupportKind>($"{path}/kind"),
             Height = values.NumberOrNone($"{path}/height"),
+            Movement = LoadMaking.Movement(values, $"{path}/movement"),
             Stiffness = hasColumn
                 ? new ColumnStiffness(values.Number($"{path}/column/height"), values.Number($"{path}/column/modulus"), values.Number($"{path}/column/inertia"),
                     values.NumberOrNone($"{path}/column/foundation-along"), values.NumberOrNone($"{path}/column/foundation-turning"))
@@ -105,6 +107,8 @@ internal sealed class PlanMaking
     private Segment Segment(string path, string id, ImmutableArray<Support> supports)
     {
         var (start, end) = (values.Number($"{path}/start"), values.Number($"{path}/end"));
+        var section = SectionMaking.Section(document, values, $"{path}/section");
+        if (section is not null) values.Undefault($"{path}/axial-stiffness");
         return new Segment
         {
             Id = id,
@@ -112,9 +116,13 @@ internal sealed class PlanMaking
             Start = start,
             End = end,
             Kind = Word<DeckKind>($"{path}/kind"),
-            Depth = values.NumberOrNone($"{path}/depth") ?? DefaultDepth(path, start, end, supports),
+            Depth = values.NumberOrNone($"{path}/depth") ?? section?.Depth ?? DefaultDepth(path, start, end, supports),
             AxialStiffness = values.Number($"{path}/axial-stiffness"),
             Expansion = values.NumberOrNone($"{path}/expansion"),
+            Section = section,
+            Gradient = SectionMaking.Gradient(values, $"{path}/gradient"),
+            DeadLoad = LoadMaking.DeadLoad(values, $"{path}/dead-load"),
+            Braking = LoadMaking.Braking(values, $"{path}/braking"),
             Creep = Shortening($"{path}/creep"),
             Shrinkage = Shortening($"{path}/shrinkage"),
         };
@@ -151,6 +159,7 @@ internal sealed class PlanMaking
             On = on,
             Station = values.NumberOrNone($"{path}/station") ?? below?.Station ?? double.NaN,
             Kind = Word<BearingKind>($"{path}/kind"),
+            Depth = values.NumberOrNone($"{path}/depth"),
             Pads = !values.HasGroup($"{path}/pads") ? null : new Pads(values.Whole($"{path}/pads/count"), values.Number($"{path}/pads/shear-modulus"),
                 values.Number($"{path}/pads/plan-area"), values.Number($"{path}/pads/elastomer-thickness")),
             SettingTemperature = values.NumberOrNone($"{path}/setting/temperature"),
@@ -163,7 +172,7 @@ internal sealed class PlanMaking
     {
         var path = $"bearings/{bearing.Id}";
         if (bearing.SettingTemperature is null)
-            values.Default($"{path}/setting/temperature", "as the joint", bearing.Kind == BearingKind.Fixed
+            values.Default($"{path}/setting/temperature", "as the joint", bearing.Kind is BearingKind.Fixed or BearingKind.Monolithic
                 ? "a single fixed line does not travel: its setting state plays no part"
                 : $"nothing is given: taken as tied at zero shear when the joint was set ({(deck is null ? "deck" : MemberWords.Of(deck.Kind))} deck)");
     }

@@ -57,6 +57,15 @@ public sealed class DisplayProfile
         [Quantity.Ratio] = new(Unit.One, Decimals(3)),
         [Quantity.Count] = new(Unit.One, Decimals(0)),
         [Quantity.Flexibility] = new(Unit.MillimetrePerKilonewton, Significant(4)),
+        [Quantity.LineLoad] = new(Unit.KilonewtonPerMetre, Significant(4)),
+        [Quantity.Moment] = new(Unit.KilonewtonMetre, Significant(4)),
+        [Quantity.BendingStiffness] = new(Unit.MeganewtonSquareMetre, Significant(4)),
+        [Quantity.Curvature] = new(Unit.PerMetre, Decimals(2), -6),
+        [Quantity.Rotation] = new(Unit.Radian, Decimals(3), -3),
+        [Quantity.TemperatureGradient] = new(Unit.KelvinPerMetre, Decimals(2)),
+        [Quantity.StiffnessPerDegree] = new(Unit.KilonewtonPerKelvin, Significant(4)),
+        [Quantity.ConnectionStiffness] = new(Unit.MeganewtonPerSquareMetre, Significant(4)),
+        [Quantity.InfluenceArea] = new(Unit.MillimetrePerKilonewtonPerMetre, Significant(4)),
     });
 
     /// <summary>Feet in decimals for the deck, inches for gaps and movements, kips, degrees Fahrenheit.</summary>
@@ -84,6 +93,15 @@ public sealed class DisplayProfile
         [Quantity.Ratio] = new(Unit.One, Decimals(3)),
         [Quantity.Count] = new(Unit.One, Decimals(0)),
         [Quantity.Flexibility] = new(Unit.InchPerKip, Significant(4)),
+        [Quantity.LineLoad] = new(Unit.KipPerFoot, Significant(4)),
+        [Quantity.Moment] = new(Unit.KipFoot, Significant(4)),
+        [Quantity.BendingStiffness] = new(Unit.KipSquareFoot, Significant(4)),
+        [Quantity.Curvature] = new(Unit.PerFoot, Decimals(2), -6),
+        [Quantity.Rotation] = new(Unit.Radian, Decimals(3), -3),
+        [Quantity.TemperatureGradient] = new(Unit.FahrenheitPerFoot, Decimals(2)),
+        [Quantity.StiffnessPerDegree] = new(Unit.KipPerFahrenheit, Significant(4)),
+        [Quantity.ConnectionStiffness] = new(Unit.KipPerSquareInch, Significant(4)),
+        [Quantity.InfluenceArea] = new(Unit.InchPerKipPerFoot, Significant(4)),
     });
 
     /// <summary>Every profile there is.</summary>

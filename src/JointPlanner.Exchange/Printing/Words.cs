@@ -1,4 +1,5 @@
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Frames;
 using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Exchange.Printing;
@@ -61,7 +62,17 @@ public static class Words
         BearingKind.Fixed => "fixed",
         BearingKind.Free => "free",
         BearingKind.Elastomeric => "elastomeric",
+        BearingKind.Monolithic => "built in",
         _ => throw new ArgumentOutOfRangeException(nameof(kind)),
+    };
+
+    /// <summary>In which way a point of the frame moves.</summary>
+    public static string Of(Direction direction) => direction switch
+    {
+        Direction.Along => "along",
+        Direction.Vertical => "vertical",
+        Direction.Turning => "turning",
+        _ => throw new ArgumentOutOfRangeException(nameof(direction)),
     };
 
     /// <summary>What a support line is.</summary>

@@ -31,6 +31,7 @@ internal static class BearingPart
                 $"{SheetPage.StepOf(b.HotAtEnd)} {SheetPage.StepOf(b.ColdAtEnd)}",
             ];
         }));
+        if (!page.Result.BearingMovements.IsEmpty) yield return OtherCauses(page);
         if (page.Result.Restraints.IsEmpty) yield break;
         yield return Table.Of("Forces of lines that hold back the deck, on the deck, positive up-station",
         [
@@ -45,4 +46,16 @@ internal static class BearingPart
             ];
         }));
     }
+
+    private static Table OtherCauses(SheetPage page) => Table.Of("Travel up-station and rotation of the deck, rising up-station positive, by causes that the frame computes, without factors",
+    [
+        new("Line") { NamesRows = true }, new("Cause"), new("Travel, most", Align.Right), new("Travel, least", Align.Right), new("Rotation, most", Align.Right),
+        new("Rotation, least", Align.Right), new("Steps"),
+    ], page.Result.BearingMovements.Select(b => (IReadOnlyList<Words>)
+    [
+        SheetPage.MarkOf(page.Plan.Bearings.First(x => x.Id == b.Bearing).Mark, b.Bearing), Said.Of(b.Cause),
+        page.WithUnit(Quantity.Movement, b.TravelMost.Value), page.WithUnit(Quantity.Movement, b.TravelLeast.Value),
+        b.RotationMost is { } most ? page.WithUnit(Quantity.Rotation, most.Value) : "", b.RotationLeast is { } least ? page.WithUnit(Quantity.Rotation, least.Value) : "",
+        $"{SheetPage.StepOf(b.TravelMost)} {SheetPage.StepOf(b.TravelLeast)}",
+    ]));
 }

@@ -1,7 +1,10 @@
 using System.Globalization;
 using JointPlanner.Engine;
 using JointPlanner.Engine.Formulas;
+using JointPlanner.Engine.Frames;
 using JointPlanner.Pdf;
+using Said = JointPlanner.Exchange.Printing.Words;
+using Words = JointPlanner.Pdf.Words;
 
 namespace JointPlanner.Sheets.Parts;
 
@@ -13,11 +16,14 @@ internal static class ModelPart
         if (page.Result.Model is not { } listing) yield break;
         yield return new Heading(1, "Model and hand checks") { Number = "7" };
         yield return new Paragraph(
-            $"Axial members along the deck with springs to supports and ground. Largest out-of-balance {Small(listing.Residual)} of the largest load; " +
+            $"Plane frame along the neutral axes: points of decks whose section is described move along, vertically and by turning, others only along the deck. Bearings " +
+            $"and supports act at their own levels through rigid links. Largest out-of-balance {Small(listing.Residual)} of the largest term; " +
             $"smallest pivot {Small(listing.PivotRatio)} of its diagonal; one refinement step changed displacements by {Small(listing.RefinementChange)}.");
+        foreach (var block in SectionPart.Of(page)) yield return block;
         yield return HandChecks(page);
         yield return Members(page, listing);
         if (listing.Model.Springs.Length > 0) yield return Springs(page, listing);
+        if (listing.Model.Links.Length > 0) yield return Links(page, listing);
     }
 
     private static Table HandChecks(SheetPage page) => Table.Of("Solved lengths beside their elementary checks",
@@ -25,29 +31,41 @@ internal static class ModelPart
         new("What") { NamesRows = true }, new("Solved", Align.Right), new("By hand", Align.Right), new("Band ±", Align.Right), new("Agrees"), new("Why they may differ"),
     ], page.Result.HandChecks.Select(c => (IReadOnlyList<Words>)
     [
-        c.What, page.WithUnit(Quantity.Length, c.Solved.Value), c.ByHand is { } hand ? page.WithUnit(Quantity.Length, hand.Value) : "none",
-        page.WithUnit(Quantity.Length, c.Band), c.ByHand is null ? "" : c.Agrees ? "yes" : "no", c.Reason,
+        c.What, page.WithUnit(c.Quantity, c.Solved.Value), c.ByHand is { } hand ? page.WithUnit(c.Quantity, hand.Value) : "none",
+        page.WithUnit(c.Quantity, c.Band), c.ByHand is null ? "" : c.Agrees ? "yes" : "no", c.Reason,
     ]));
 
-    private static Table Members(SheetPage page, ModelListing listing) => Table.Of("Members (points that move as one share a number; − does not move)",
+    private static Table Members(SheetPage page, ModelListing listing) => Table.Of("Members; EI only where the piece bends, EA only where it changes its length",
     [
-        new("From") { NamesRows = true }, new("Station", Align.Right), new("Unknown", Align.Right), new("To"), new("Station", Align.Right), new("Unknown", Align.Right),
-        new("Length", Align.Right), new("EA", Align.Right),
+        new("From") { NamesRows = true }, new("Station", Align.Right), new("To"), new("Station", Align.Right), new("Length", Align.Right), new("EA", Align.Right), new("EI", Align.Right),
     ], listing.Model.Members.Select(m => (IReadOnlyList<Words>)
     [
-        m.From.Name, page.WithUnit(Quantity.Length, m.From.Station), Unknown(m.From.Unknown), m.To.Name, page.WithUnit(Quantity.Length, m.To.Station), Unknown(m.To.Unknown),
-        page.WithUnit(Quantity.Length, m.Length), page.WithUnit(Quantity.AxialStiffness, m.AxialStiffness),
+        m.From.Name, page.WithUnit(Quantity.Length, m.From.Station), m.To.Name, page.WithUnit(Quantity.Length, m.To.Station), page.WithUnit(Quantity.Length, m.Length),
+        m.AxialStiffness > 0 ? page.WithUnit(Quantity.AxialStiffness, m.AxialStiffness) : "", m.BendingStiffness > 0 ? page.WithUnit(Quantity.BendingStiffness, m.BendingStiffness) : "",
     ]));
 
-    private static Table Springs(SheetPage page, ModelListing listing) => Table.Of("Springs along the deck",
+    private static Table Springs(SheetPage page, ModelListing listing) => Table.Of("Springs; heights above the neutral axis of the deck",
     [
-        new("Spring") { NamesRows = true }, new("From"), new("To"), new("Stiffness", Align.Right),
+        new("Spring") { NamesRows = true }, new("Way"), new("From"), new("Height", Align.Right), new("To"), new("Height", Align.Right), new("Stiffness", Align.Right),
     ], listing.Model.Springs.Select(s => (IReadOnlyList<Words>)
     [
-        s.Name, s.From.Name, s.To?.Name ?? "ground", page.WithUnit(Quantity.Stiffness, s.Stiffness),
+        s.Name, Said.Of(s.Direction), s.From.Name, page.WithUnit(Quantity.Size, s.FromHeight), s.To?.Name ?? "ground", s.To is null ? "" : page.WithUnit(Quantity.Size, s.ToHeight),
+        page.WithUnit(s.Direction == Direction.Turning ? Quantity.RotationalStiffness : Quantity.Stiffness, s.Stiffness),
     ]));
 
-    private static string Unknown(int unknown) => unknown < 0 ? "−" : unknown.ToString(CultureInfo.InvariantCulture);
+    private static Table Links(SheetPage page, ModelListing listing) => Table.Of("Rigid links: each sum is nothing unless the ground is moved; factors of turning are levels",
+    [
+        new("Link") { NamesRows = true }, new("Condition"),
+    ], listing.Model.Links.Select(l => (IReadOnlyList<Words>)[l.Name, string.Join(" ", l.Terms.Select((t, i) => Term(page, listing, t, i == 0)))]));
+
+    private static string Term(SheetPage page, ModelListing listing, (int Freedom, double Factor) term, bool isFirst)
+    {
+        var (node, direction) = listing.Model.OwnerOf(term.Freedom);
+        var size = Math.Abs(term.Factor);
+        var factor = direction == Direction.Turning && size != 1 ? page.WithUnit(Quantity.Size, size) + " · " : "";
+        var sign = term.Factor < 0 ? "− " : isFirst ? "" : "+ ";
+        return $"{sign}{factor}{node.Name} {Said.Of(direction)}";
+    }
 
     private static string Small(double value) => value == 0 ? "0" : value.ToString("0.0e-0", CultureInfo.InvariantCulture).Replace('-', '−');
 }

@@ -20,8 +20,10 @@ internal static class StepsThatCount
     [
         .. result.Segments.SelectMany(s => new[] { s.Temperature.Min, s.Temperature.Max, s.Temperature.DoubtAllowance, s.Temperature.Expansion }),
         .. result.Segments.Select(s => s.ZeroMovementPoint).OfType<Number>(),
+        .. result.Segments.SelectMany(s => s.Section?.Numbers ?? []),
         .. result.Joints.SelectMany(Roots),
         .. result.Bearings.SelectMany(b => new[] { b.HotAtStart, b.ColdAtStart, b.HotAtEnd, b.ColdAtEnd }),
+        .. result.BearingMovements.SelectMany(b => new Number?[] { b.TravelMost, b.TravelLeast, b.RotationMost, b.RotationLeast }).OfType<Number>(),
         .. result.Restraints.SelectMany(r => new[] { r.Hot, r.Cold }),
         .. result.HandChecks.SelectMany(c => c.ByHand is { } hand ? new[] { c.Solved, hand } : [c.Solved]),
     ];

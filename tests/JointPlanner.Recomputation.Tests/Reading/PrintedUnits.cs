@@ -62,6 +62,21 @@ public static class PrintedUnits
         ["a"] = (365.25 * 86400, Second),
         ["mm/kN"] = (1e-6, Length - Force),
         ["in/kip"] = (In / Kip, Length - Force),
+        ["kN·m"] = (1e3, Force + Length),
+        ["MN·m"] = (1e6, Force + Length),
+        ["kip·ft"] = (Kip * Ft, Force + Length),
+        ["kN·m²"] = (1e3, Force + (Length * 2)),
+        ["MN·m²"] = (1e6, Force + (Length * 2)),
+        ["kip·ft²"] = (Kip * Ft * Ft, Force + (Length * 2)),
+        ["/m"] = (1, Length * -1),
+        ["/ft"] = (1 / Ft, Length * -1),
+        ["K/m"] = (1, Degree - Length),
+        ["°F/ft"] = (DegF / Ft, Degree - Length),
+        ["kN/K"] = (1e3, Force - Degree),
+        ["kip/°F"] = (Kip * 1.8, Force - Degree),
+        ["MN/m²"] = (1e6, Force - (Length * 2)),
+        ["mm/(kN/m)"] = (1e-6, (Length * 2) - Force),
+        ["in/(kip/ft)"] = (In * Ft / Kip, (Length * 2) - Force),
     };
 
     private static readonly KeyValuePair<string, (double Factor, Powers Powers)>[] LongestFirst = [.. Known.OrderByDescending(k => k.Key.Length)];

@@ -26,8 +26,9 @@ public sealed class MovementsAreNotComputedToo : PlanRule
     private static bool IsComputed(PlanUnderCheck check, GivenMovement movement)
     {
         if (movement.Cause == Cause.UniformTemperature) return true;
-        if (movement.Cause is not (Cause.Creep or Cause.Shrinkage)) return false;
         var joint = check.Plan.Joints.FirstOrDefault(j => j.Id == movement.Joint);
+        if (joint is not null && ComputedCauses.ByFrame(check.Plan, joint, movement.Cause)) return true;
+        if (movement.Cause is not (Cause.Creep or Cause.Shrinkage)) return false;
         return joint is not null && new[] { joint.Near, joint.Far }.Select(check.SegmentOf)
             .Any(s => (movement.Cause == Cause.Creep ? s?.Creep : s?.Shrinkage) is not null);
     }

@@ -9,7 +9,7 @@ public abstract class PlanRule
     public static readonly ImmutableArray<PlanRule> All =
     [
         new SupportsInOrder(), new SegmentsInOrder(), new SpansAreUsual(), new BearingsUnderTheirSegment(), new PadsWhereTheyBelong(),
-        new LayersAreWhole(), new ColumnsBuiltIn(),
+        new LayersAreWhole(), new ColumnsBuiltIn(), new ProfilesAreWhole(), new TrafficIsWhole(),
         new JointsBetweenTwoBodies(), new OneJointAtAFace(), new DeckIsHeld(), new DevelopmentRises(), new DeckAgesAreGiven(),
         new BearingSettingsAreGiven(), new SettingNotBeforeLeastAge(), new ClimateInOrder(), new MovementsAreNotComputedToo(), new SettingTableHasRows(),
     ];
