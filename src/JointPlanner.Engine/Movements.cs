@@ -56,7 +56,8 @@ public sealed class Movements
         var segments = plan.Segments.Select(s => new SegmentResult(s, temperatures[s.Id],
             ZeroMovementPoints.Of(s, lengths, id => temperatures[id].Expansion.Value, derivation),
             SectionResult.Of(plan, lengths.Deck.SectionOf(s.Id), temperatures[s.Id], derivation))).ToImmutableArray();
-        temperatures = segments.ToImmutableDictionary(s => s.Segment.Id, s => s.Temperature with { BestEstimate = s.Section?.EffectiveExpansion });
+        segments = [.. segments.Select(s => s with { Temperature = s.Temperature with { BestEstimate = s.Section?.EffectiveExpansion } })];
+        temperatures = segments.ToImmutableDictionary(s => s.Segment.Id, s => s.Temperature);
         var causes = new FrameCauses(plan, basis, lengths, id => temperatures[id], derivation);
         var checks = new HandCheckedLengths(plan, lengths.Deck, derivation);
 
@@ -86,7 +87,8 @@ public sealed class Movements
             BearingMovements = BearingMovements.Of(plan, lengths.Deck, causes, derivation),
             Gradients = [.. causes.Gradients.Select(g => (g.Segment.Id, g.Warm, g.Cool))],
             HandChecks = [.. checks.All, .. rotations],
-            Model = new ModelListing(lengths.Deck.Model, Math.Max(lengths.Residual, causes.Residual), lengths.Solver.PivotRatio, lengths.RefinementChange),
+            Model = new ModelListing(lengths.Deck.Model, Math.Max(lengths.Residual, causes.Residual), lengths.Solver.PivotRatio, Math.Max(lengths.RefinementChange, causes.RefinementChange),
+                causes.Listed),
             MemoryValues = MemoryValues.Of(derivation.Steps, counting, joints, owner?.Rules),
         };
     }

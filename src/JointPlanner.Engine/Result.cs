@@ -81,4 +81,6 @@ public sealed record RestraintForce(string Bearing, Number Hot, Number Cold);
 /// <param name="Residual">Largest out-of-balance of all states, relative to the largest load.</param>
 /// <param name="PivotRatio">Smallest pivot relative to its diagonal entry.</param>
 /// <param name="RefinementChange">Largest change by one refinement step, relative.</param>
-public sealed record ModelListing(FrameModel Model, double Residual, double PivotRatio, double RefinementChange);
+/// <param name="States">What acted on it beside a unit strain of each segment and a unit of each movement under traffic: cause, state and the numbers of it.</param>
+public sealed record ModelListing(
+    FrameModel Model, double Residual, double PivotRatio, double RefinementChange, ImmutableArray<(Cause Cause, string State, ImmutableArray<Number> Numbers)> States);

@@ -42,6 +42,9 @@ internal static class ComputeCommand
         if (withSteps)
         {
             output.WriteLine();
+            output.WriteLine("Model, as solved");
+            foreach (var line in ModelText.Lines(result, profile)) output.WriteLine(line);
+            output.WriteLine();
             output.WriteLine("Steps");
             foreach (var line in new StepPrinter(result.Steps, profile).All.SelectMany(StepText.Lines)) output.WriteLine(line);
         }

@@ -44,6 +44,13 @@ public sealed class FrameCauses
     /// <summary>Largest residual of all states.</summary>
     public double Residual => States.Values.SelectMany(s => s).Select(s => s.Solution.Residual).DefaultIfEmpty(0).Max();
 
+    /// <summary>Largest refinement change of all states.</summary>
+    public double RefinementChange => States.Values.SelectMany(s => s).Select(s => s.Solution.RefinementChange).DefaultIfEmpty(0).Max();
+
+    /// <summary>Every state with the numbers that it was made from, by cause.</summary>
+    public ImmutableArray<(Cause Cause, string State, ImmutableArray<Number> Numbers)> Listed =>
+        [.. States.OrderBy(c => c.Key).SelectMany(c => c.Value.Select(s => (c.Key, s.Name, s.Inputs)))];
+
     /// <summary>What the frame's causes do to a joint, for those that the plan describes whole.</summary>
     public ImmutableArray<OtherPart> Of(Joint joint)
     {

@@ -14,20 +14,25 @@ public sealed class DeckModel
     private readonly Dictionary<string, Number> stiffnesses;
     private readonly ImmutableDictionary<string, SectionProperties> sections;
 
-    internal DeckModel(DeckModelMaking made)
+    private DeckModel(DeckModelMaking made, Derivation derivation)
     {
         (plan, nodes, supports, stiffnesses, sections) = (made.Plan, made.Nodes, made.Supports, made.Stiffnesses, made.Sections);
-        (Model, Inputs) = (made.Model(), [.. made.Inputs]);
+        Model = made.Model();
+        Inputs =
+        [
+            derivation.Solved("", "n_f", "number of freedoms of the frame, before rigid links; every solved movement rests on it and so on all that it was built from",
+                Quantity.Count, Model.Freedoms, FrameWords.Name, 0, [.. made.Inputs]),
+        ];
     }
 
     /// <summary>The frame.</summary>
     public FrameModel Model { get; }
 
-    /// <summary>Steps that the frame was built from.</summary>
+    /// <summary>The one step that stands for the frame: it rests on all that the frame was built from.</summary>
     public ImmutableArray<Number> Inputs { get; }
 
     /// <summary>Builds the frame; stiffnesses become steps of the derivation.</summary>
-    public static DeckModel Of(Plan plan, Derivation derivation) => new(new DeckModelMaking(plan, derivation));
+    public static DeckModel Of(Plan plan, Derivation derivation) => new(new DeckModelMaking(plan, derivation), derivation);
 
     /// <summary>Stiffness of a support or an elastomeric line by id; null where it does not yield or has none.</summary>
     public Number? StiffnessOf(string id) => stiffnesses.TryGetValue(id, out var k) ? k : null;

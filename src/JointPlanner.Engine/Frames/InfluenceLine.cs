@@ -18,6 +18,16 @@ public readonly record struct CubicPiece(double From, double To, double C0, doub
         return C0 + (t * (C1 + (t * (C2 + (t * C3)))));
     }
 
+    /// <summary>A bound on its ordinates.</summary>
+    public double Size
+    {
+        get
+        {
+            var l = To - From;
+            return Math.Abs(C0) + (l * (Math.Abs(C1) + (l * (Math.Abs(C2) + (l * Math.Abs(C3))))));
+        }
+    }
+
     /// <summary>Integral from its start to a station within it.</summary>
     public double AreaTo(double station)
     {
@@ -36,11 +46,16 @@ public readonly record struct WorstPosition(double Position, double Value);
 /// <param name="Residual">Out-of-balance of the solution that it comes from.</param>
 public sealed record InfluenceLine(ImmutableArray<CubicPiece> Pieces, double Residual)
 {
+    /// <summary>Pieces whose ordinates are below this share of the largest are left out: far spans of long decks, which would only cost time.</summary>
+    private const double Negligible = 1e-10;
+
     /// <summary>The line of a response under vertical load, downward positive.</summary>
     public static InfluenceLine Of(Response response, FrameSolver solver, DeckModel deck)
     {
         var adjoint = solver.Solve(new FrameLoad(deck.Model).Adjoint(response));
-        return new InfluenceLine([.. deck.Carriageway.Select(m => Piece(m, adjoint))], adjoint.Residual);
+        ImmutableArray<CubicPiece> pieces = [.. deck.Carriageway.Select(m => Piece(m, adjoint))];
+        var least = Negligible * pieces.Select(p => p.Size).DefaultIfEmpty(0).Max();
+        return new InfluenceLine([.. pieces.Where(p => p.Size > least)], adjoint.Residual);
     }
 
     /// <summary>Value at a station; 0 off the deck.</summary>

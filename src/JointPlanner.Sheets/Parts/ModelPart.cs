@@ -24,6 +24,7 @@ internal static class ModelPart
         yield return Members(page, listing);
         if (listing.Model.Springs.Length > 0) yield return Springs(page, listing);
         if (listing.Model.Links.Length > 0) yield return Links(page, listing);
+        if (!listing.States.IsEmpty) yield return States(listing);
     }
 
     private static Table HandChecks(SheetPage page) => Table.Of("Solved lengths beside their elementary checks",
@@ -57,6 +58,12 @@ internal static class ModelPart
     [
         new("Link") { NamesRows = true }, new("Condition"),
     ], listing.Model.Links.Select(l => (IReadOnlyList<Words>)[l.Name, string.Join(" ", l.Terms.Select((t, i) => Term(page, listing, t, i == 0)))]));
+
+    private static Table States(ModelListing listing) => Table.Of(
+        "What acted on it, beside a unit strain of each segment and a unit of each movement under traffic",
+    [
+        new("Cause") { NamesRows = true }, new("State"), new("Numbers in steps"),
+    ], listing.States.Select(s => (IReadOnlyList<Words>)[Said.Of(s.Cause), s.State, string.Join(" ", s.Numbers.Select(SheetPage.StepOf))]));
 
     private static string Term(SheetPage page, ModelListing listing, (int Freedom, double Factor) term, bool isFirst)
     {

@@ -24,6 +24,7 @@ internal static class StepsThatCount
         .. result.Joints.SelectMany(Roots),
         .. result.Bearings.SelectMany(b => new[] { b.HotAtStart, b.ColdAtStart, b.HotAtEnd, b.ColdAtEnd }),
         .. result.BearingMovements.SelectMany(b => new Number?[] { b.TravelMost, b.TravelLeast, b.RotationMost, b.RotationLeast }).OfType<Number>(),
+        .. (result.Model?.States ?? []).SelectMany(s => s.Numbers),
         .. result.Restraints.SelectMany(r => new[] { r.Hot, r.Cold }),
         .. result.HandChecks.SelectMany(c => c.ByHand is { } hand ? new[] { c.Solved, hand } : [c.Solved]),
     ];

@@ -46,6 +46,17 @@ public sealed class ComputeCommandTests : IDisposable
     }
 
     [Fact]
+    public void The_model_is_listed_with_members_levels_and_what_acted()
+    {
+        var text = Ran.Of("compute", SeedData.Structure("heron-weir-bridge"), "--steps").Output;
+        Assert.Contains("\nModel, as solved\n", text, StringComparison.Ordinal);
+        // Bearing level 1.76 m below the top, neutral axis 0.3427 m below it: EA and EI of slab and girders.
+        Assert.Contains("  link b2 holds: deck#3 along + 1417.3 mm · deck#3 turning − p2#1 along = 0", text, StringComparison.Ordinal);
+        Assert.Contains("107512 MN", text, StringComparison.Ordinal);
+        Assert.Contains("  acted: dead load still to come, all of it placed, numbers in steps [", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_cause_that_is_not_included_stops_issue_and_is_named()
     {
         var plan = seed.Altered(p => p["movements"] = new JsonArray());

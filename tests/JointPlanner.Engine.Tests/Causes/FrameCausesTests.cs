@@ -111,6 +111,22 @@ public sealed class FrameCausesTests
         Assert.Contains(Cause.LiveLoad, result.Joints[0].NotIncluded);
     }
 
+    [Theory]
+    [InlineData(13e-6, 13e-6)]
+    [InlineData(10e-6, 12e-6)]
+    public void The_window_slopes_with_the_larger_of_the_basis_and_the_best_estimate(double layers, double expected)
+    {
+        var section = Simple.Segments[0].Section!;
+        var result = Movements.Of(With(s => s with { Section = section with { Layers = [.. section.Layers.Select(l => l with { Expansion = layers })] } }), new PlainBasis(), null);
+        var part = Assert.Single(result.Joints[1].Demand.Thermal);
+        Assert.Equal(12e-6 * 40, part.Rate.Value, 1e-12);
+        Assert.Equal(expected * 40, part.WindowRate.Value, 1e-12);
+    }
+
+    [Fact]
+    public void A_deck_fixed_at_bearing_level_stands_still_there_though_its_axis_lies_above() =>
+        Assert.Equal(0, Movements.Of(Simple, new PlainBasis(), null).Segments[0].ZeroMovementPoint!.Value.Value, 1e-9);
+
     [Fact]
     public void A_basis_without_profiles_is_told_to_be_silent()
     {
