@@ -62,5 +62,18 @@ public sealed class En1991Part1To5LoadsTests
         }
     }
 
+    /// <summary>From memory, check against the licensed text: EN 1991-1-5 6.1.5 counts the larger of ΔT_M + 0.35·ΔT_N and 0.75·ΔT_M + ΔT_N; both in full are never less.</summary>
+    [Theory]
+    [InlineData(0, 5)]
+    [InlineData(20, 1)]
+    [InlineData(4, 4)]
+    public void Difference_and_uniform_part_count_together_for_no_less_than_either_combination(double uniform, double difference)
+    {
+        var counting = new En1991Part1To5Basis().Counting(SafetyFormat.Degrees);
+        var counted = (Assert.IsType<Counted>(counting[Cause.UniformTemperature, Column.GapService]).Factor * uniform)
+            + (Assert.IsType<Counted>(counting[Cause.TemperatureDifference, Column.GapService]).Factor * difference);
+        Assert.True(counted >= Math.Max(difference + (0.35 * uniform), (0.75 * difference) + uniform));
+    }
+
     private static LoadModel Model(LiveLoad traffic) => Assert.IsType<Said<LoadModel>>(new En1991Part1To5Basis().LiveLoad(traffic, new Derivation())).Value;
 }

@@ -70,11 +70,11 @@ public sealed class En1991Part1To5Basis : CodeBasis
         foreach (var cause in new[] { Creep, Shrinkage })
             foreach (var column in new[] { GapService, GapStrength, SealRange, Racking, BearingTravel })
                 table = table.With(cause, column, new Counted(1.0) { Source = permanent });
-        // 6.1.5: ω_M on the difference beside the full uniform part; the other combination governs only where the difference moves the joint more.
-        var together = Memory("6.1.5: ω_M = 0.75 beside the full uniform part", "en-1991-1-5-2003/omega-m");
+        // Either combination of 6.1.5 may govern, and at a joint beside a fixed bearing it is the one with the full difference.
+        var together = Provenance.Derived("6.1.5 reduces either the difference or the uniform part beside the other; both in full bound either combination");
         foreach (var column in new[] { GapService, SealRange, Racking, BearingTravel, BearingRotation })
-            table = table.With(Cause.TemperatureDifference, column, new Counted(0.75) { Source = together });
-        table = table.With(Cause.TemperatureDifference, GapStrength, new Counted(0.75 * strength) { Source = together });
+            table = table.With(Cause.TemperatureDifference, column, new Counted(1.0) { Source = together });
+        table = table.With(Cause.TemperatureDifference, GapStrength, new Counted(strength) { Source = together });
         var settlement = new Provenance(Mark.Seen, "an open-source finite-element library restating EN 1990 Annex A2", "", "settlement, linear analysis, set B");
         foreach (var cause in new[] { DeadLoad, Substructure })
             foreach (var column in new[] { GapService, SealRange, Racking, BearingTravel, BearingRotation })

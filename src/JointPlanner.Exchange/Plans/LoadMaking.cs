@@ -13,10 +13,15 @@ internal static class LoadMaking
         Carriageway = values.NumberOrNone("live-load/carriageway"),
         Distribution = values.NumberOrNone("live-load/distribution"),
         DistributionSource = values.Text("live-load/distribution-source"),
-        Own = !values.HasGroup("live-load/own") ? null : new OwnLoads(
-            [.. values.Items("live-load/own/trains").Select(p => Train(values, p))],
-            values.Number("live-load/own/uniform"), values.Number("live-load/own/dynamic"), values.Text("live-load/own/source")),
+        Own = values.HasGroup("live-load/own") ? Own(values, "live-load/own") : null,
     };
+
+    private static OwnLoads Own(FieldValues values, string path)
+    {
+        if (values.NumberOrNone($"{path}/dynamic") is null) values.Default($"{path}/dynamic", "1", "no dynamic factor is given");
+        return new OwnLoads([.. values.Items($"{path}/trains").Select(p => Train(values, p))],
+            values.Number($"{path}/uniform"), values.NumberOrNone($"{path}/dynamic") ?? 1, values.Text($"{path}/source"));
+    }
 
     public static SubstructureMovement? Movement(FieldValues values, string path) => !values.HasGroup(path) ? null : new SubstructureMovement(
         values.Number($"{path}/settlement"), values.Number($"{path}/along"), values.Number($"{path}/tilt"), values.Text($"{path}/source"));

@@ -266,7 +266,7 @@ public static class PlanFields
         Maybe("live-load/own/trains/*/axles/*/spacing", "axle spacing", new QuantityEntry(Quantity.Length, new("0.1 m", "200 m")), "Behind the axle before it; none for the first.", "4.3 m"),
         Maybe("live-load/own/trains/*/axles/*/spacing-most", "largest axle spacing", new QuantityEntry(Quantity.Length, new("0.1 m", "200 m")), "Where the spacing varies.", "9 m"),
         Default("live-load/own/uniform", "uniform load", LineLoad, "Per length, on adverse lengths.", "0 kN/m", "no uniform load is given", "9.3 kN/m"),
-        Default("live-load/own/dynamic", "dynamic factor", new RatioEntry(1, 3), "On the trains alone.", "1", "no dynamic factor is given", "1.33"),
+        Maybe("live-load/own/dynamic", "dynamic factor", new RatioEntry(1, 3), "On the trains alone; 1 where nothing is given.", "1.33"),
         Needed("live-load/own/source", "source of the loads", new TextEntry(Note), "Where they come from."),
 
         Group("setting-table", "setting table", "Rows of the setting table.", isAlwaysThere: true),
