@@ -34,7 +34,11 @@ public sealed class RevisionTests(RunningSite site) : IClassFixture<RunningSite>
         await designer.Go($"/revisions/{revision}");
         await designer.Gravely(null, designer.Page.Locator("details.more:has(#key) summary"));
         await designer.Page.ClickAsync("details.more:has(#key) summary");
+        const string told = "field => field.validationMessage";
+        await designer.Page.SetInputFilesAsync("#key", new FilePayload { Name = "me.pfx", MimeType = "application/x-pkcs12", Buffer = new byte[40000] });
+        Assert.Equal("me.pfx is larger than 32 KiB. Choose another file.", await designer.Page.EvalOnSelectorAsync<string>("#key", told));
         await designer.Page.SetInputFilesAsync("#key", site.KeyFile("designer"));
+        Assert.Equal("", await designer.Page.EvalOnSelectorAsync<string>("#key", told));
         await designer.Page.FillAsync("#word", site.Password("designer"));
         await designer.Page.DblClickAsync("details.more:has(#key) button[type=submit]");
         await Assertions.Expect(designer.Page.GetByText("signed by the designer")).ToBeVisibleAsync();
@@ -43,7 +47,7 @@ public sealed class RevisionTests(RunningSite site) : IClassFixture<RunningSite>
     }
 
     [Fact]
-    public async Task A_signed_sheet_of_more_than_a_mebibyte_is_taken_and_one_beyond_the_limit_is_told_so()
+    public async Task A_signed_sheet_of_more_than_a_mebibyte_is_taken()
     {
         var document = new Document
         {
@@ -58,8 +62,6 @@ public sealed class RevisionTests(RunningSite site) : IClassFixture<RunningSite>
         var signed = await Life.Signed(revision, Field.Designer);
         Assert.True(signed.Length > 1 << 20, string.Create(CultureInfo.InvariantCulture, $"{signed.Length} bytes"));
         var designer = await site.Visit("designer");
-        await HandIn(designer, revision, new byte[27 << 20]);
-        Assert.Equal("signed.pdf is larger than 25 MiB. Choose the sheet itself.", await designer.Page.EvalOnSelectorAsync<string>("#signed", "field => field.validationMessage"));
         await HandIn(designer, revision, signed);
         await Assertions.Expect(designer.Page.GetByText("signed by the designer")).ToBeVisibleAsync();
     }
@@ -80,7 +82,8 @@ public sealed class RevisionTests(RunningSite site) : IClassFixture<RunningSite>
         await Assertions.Expect(designer.Page.Locator("a.revision").First).ToContainTextAsync("Revision 2");
         await designer.Page.Locator("a.revision").First.ClickAsync();
         await designer.Page.ClickAsync("text=Freeze for checking");
-        await Assertions.Expect(designer.Page.Locator("h1 .state")).ToHaveTextAsync("in check");
+        // Computed, written as a sheet and stored: seconds on a busy machine.
+        await Assertions.Expect(designer.Page.Locator("h1 .state")).ToHaveTextAsync("in check", new() { Timeout = 30000 });
         var second = new Uri(designer.Page.Url).AbsolutePath;
 
         foreach (var (width, paper) in new[] { (1440, "light"), (1440, "dark"), (390, "light") })

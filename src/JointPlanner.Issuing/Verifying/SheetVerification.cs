@@ -40,7 +40,7 @@ public sealed record SheetVerification(VerificationReport Report, IReadOnlyList<
         {
             RevisionState.Issued => [Invariant($"Revision {sheet.Number} is issued, since {since}, and no later one is.")],
             RevisionState.Superseded => [Invariant($"Superseded on {since}: a later revision than {sheet.Number} is issued. Do not build or set a joint from this one.")],
-            RevisionState.Withdrawn => [Invariant($"Withdrawn on {since}, because: {sheet.Reason} Do not build or set a joint from revision {sheet.Number}.")],
+            RevisionState.Withdrawn => [Invariant($"Withdrawn on {since}, because: {sheet.Reason?.TrimEnd('.')}. Do not build or set a joint from revision {sheet.Number}.")],
             RevisionState.Returned => [Invariant($"Never issued: revision {sheet.Number} was returned by its checker on {since}. Do not build or set a joint from it.")],
             _ => [Invariant($"Not issued: revision {sheet.Number} is still being checked. Do not build or set a joint from it.")],
         };

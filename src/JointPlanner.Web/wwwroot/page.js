@@ -71,6 +71,5 @@ document.addEventListener('change', event => {
   const most = Number(event.target.dataset?.most);
   if (!most) return;
   const large = [...event.target.files].find(file => file.size > most);
-  event.target.setCustomValidity(large ? `${large.name} is larger than ${event.target.dataset.mostSaid}. Choose the sheet itself.` : '');
-  if (large) event.target.reportValidity();
+  event.target.setCustomValidity(large ? `${large.name} is larger than ${event.target.dataset.mostSaid}. Choose another file.` : '');
 });
