@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Causes;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Combining;
 using JointPlanner.Engine.Fitting.Joints;
@@ -10,13 +11,13 @@ using JointPlanner.Engine.Plans;
 namespace JointPlanner.Engine;
 
 /// <summary>One joint from its expansion lengths to its setting table.</summary>
-internal sealed class JointCalculation(Plan plan, CodeBasis basis, Owner? owner, CountingTable counting, Derivation derivation)
+internal sealed class JointCalculation(Plan plan, CodeBasis basis, Owner? owner, CountingTable counting, RemainingStrains strains, Derivation derivation)
 {
     public JointResult Of(
         Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf, ImmutableArray<OtherPart> byFrame)
     {
         var set = SettingState(joint);
-        var demands = new JointDemands(plan, joint, lengths, temperatureOf, byFrame);
+        var demands = new JointDemands(plan, joint, lengths, temperatureOf, byFrame, strains);
         var demand = demands.At(null, derivation);
         var movements = JointMovements.Of(demand, set, derivation);
         var missing = IncludedCauses.Missing(plan, joint, [.. lengths.Select(l => l.Segment)], counting);

@@ -17,18 +17,28 @@ public sealed class Movements
     private readonly Plan plan;
     private readonly CodeBasis basis;
     private readonly Owner? owner;
+    private readonly RemainingStrains strains;
     private readonly Derivation derivation = new();
 
-    private Movements(Plan plan, CodeBasis basis, Owner? owner) => (this.plan, this.basis, this.owner) = (plan, basis, owner);
+    private Movements(Plan plan, CodeBasis basis, Owner? owner, IReadOnlyList<CreepModel> models) =>
+        (this.plan, this.basis, this.owner, strains) = (plan, basis, owner, new RemainingStrains(plan, basis, models));
+
+    /// <summary>Computes a plan whose concrete, where it describes any, follows the basis's own model.</summary>
+    /// <param name="plan">An accepted plan.</param>
+    /// <param name="basis">The code edition.</param>
+    /// <param name="owner">The owner's rules; null for none, and then nothing is fitted.</param>
+    /// <param name="cancellation">Stops between joints.</param>
+    public static Result Of(Plan plan, CodeBasis basis, Owner? owner, CancellationToken cancellation = default) => Of(plan, basis, owner, [], cancellation);
 
     /// <summary>Computes a plan. What stands in the way is a finding of the result, never an exception.</summary>
     /// <param name="plan">An accepted plan.</param>
     /// <param name="basis">The code edition.</param>
     /// <param name="owner">The owner's rules; null for none, and then nothing is fitted.</param>
+    /// <param name="models">Models of creep and shrinkage that the plan may name.</param>
     /// <param name="cancellation">Stops between joints.</param>
-    public static Result Of(Plan plan, CodeBasis basis, Owner? owner, CancellationToken cancellation = default)
+    public static Result Of(Plan plan, CodeBasis basis, Owner? owner, IReadOnlyList<CreepModel> models, CancellationToken cancellation = default)
     {
-        var movements = new Movements(plan, basis, owner);
+        var movements = new Movements(plan, basis, owner, models);
         var counting = CountingLayers.Of(plan, basis, owner?.Rules);
         try
         {
@@ -62,6 +72,7 @@ public sealed class Movements
         var checks = new HandCheckedLengths(plan, lengths.Deck, derivation);
 
         var (byHand, rotations) = (new HandCheckedRotations(plan, lengths.Deck, causes, derivation), new List<HandCheck>());
+        strains.Note(derivation);
 
         var joints = new List<JointResult>();
         foreach (var joint in plan.Joints)
@@ -69,13 +80,13 @@ public sealed class Movements
             cancellation.ThrowIfCancellationRequested();
             var byFrame = causes.Of(joint);
             rotations.AddRange(byHand.Of(joint, byFrame));
-            joints.Add(new JointCalculation(plan, basis, owner, counting, derivation)
+            joints.Add(new JointCalculation(plan, basis, owner, counting, strains, derivation)
                 .Of(joint, checks.Checked(joint, lengths.Of(joint)), id => temperatures[id], byFrame));
         }
         var bearings = plan.Bearings
-            .Select(b => BearingTravels.Of(plan, b, lengths.Of(b), id => temperatures[id], SettingTemperatures.Of(b, plan), derivation))
+            .Select(b => BearingTravels.Of(plan, b, lengths.Of(b), id => temperatures[id], SettingTemperatures.Of(b, plan), strains, derivation))
             .OfType<BearingTravel>().ToImmutableArray();
-        var restraints = RestraintForces.Of(plan, lengths, id => temperatures[id], derivation);
+        var restraints = RestraintForces.Of(plan, lengths, id => temperatures[id], strains, derivation);
         Findings.Note(plan, basis, temperatures, [.. checks.All, .. rotations], segments, restraints, derivation);
 
         return Unfinished(counting) with
@@ -94,5 +105,5 @@ public sealed class Movements
     }
 
     private Result Unfinished(CountingTable counting) =>
-        new() { Plan = plan, Counting = counting, Steps = derivation.Steps, Findings = derivation.Findings };
+        new() { Plan = plan, Counting = counting, Strains = strains, Steps = derivation.Steps, Findings = derivation.Findings };
 }

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Causes;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Combining;
 using JointPlanner.Engine.Fitting.Joints;
@@ -19,6 +20,8 @@ public sealed record Result
     public required Plan Plan { get; init; }
     /// <summary>How each cause counts, all layers laid over each other.</summary>
     public required CountingTable Counting { get; init; }
+    /// <summary>What each segment still shortens by after any setting state.</summary>
+    public required RemainingStrains Strains { get; init; }
     /// <summary>Per segment.</summary>
     public ImmutableArray<SegmentResult> Segments { get; init; } = [];
     /// <summary>Per joint.</summary>

@@ -40,7 +40,7 @@ public static class SettingDays
         var temperatures = Temperatures(table, step);
         var withoutSteps = new Derivation(keepsSteps: false);
         var demands = new JointDemands(result.Plan, joint.Joint, joint.ExpansionLengths, id => result.Segments.First(s => s.Segment.Id == id).Temperature,
-            [.. joint.Demand.Others.Where(o => ComputedCauses.ByFrame(result.Plan, joint.Joint, o.Cause))]);
+            [.. joint.Demand.Others.Where(o => ComputedCauses.ByFrame(result.Plan, joint.Joint, o.Cause))], result.Strains);
         var byAge = table.Ages.Select(age => age == joint.Demand.DeckAge ? joint.Demand : demands.At(age, withoutSteps)).ToArray();
         var tables = Methods(result.Plan, owner.Rules).Select(method => new MethodTable(method, table with
         {

@@ -59,7 +59,7 @@ public sealed record Calculation
     /// <param name="cancellation">Stops between joints.</param>
     public static Calculation Of(PlanDocument document, OwnerRuleShelf shelf, CancellationToken cancellation = default)
     {
-        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All, OwnerRules = shelf.Ids }).Read(document);
+        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All, CreepModels = Catalogue.CreepModels, OwnerRules = shelf.Ids }).Read(document);
         var owner = shelf.Find(document.TextAt("basis/owner-rules") ?? "");
         return Of(reading, owner, ProfileOf(document).SettingStep, cancellation);
     }
@@ -67,7 +67,7 @@ public sealed record Calculation
     /// <summary>Computes a package from itself alone: no shelf, no database.</summary>
     public static Calculation Of(CalculationPackage package, CancellationToken cancellation = default)
     {
-        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All }).Read(package.Plan);
+        var reading = new PlanReader(new KnownWords { Bases = Catalogue.All, CreepModels = Catalogue.CreepModels }).Read(package.Plan);
         return Of(reading, package.OwnerRules is { } rules ? OwnerRulesReader.Read(rules) : null, package.RoundingStep, cancellation);
     }
 
@@ -112,7 +112,7 @@ public sealed record Calculation
     {
         var basis = Catalogue.Find(reading.Document?.TextAt("basis/code") ?? "");
         var result = reading.Plan is { } plan && basis is not null
-            ? Movements.Of(plan, basis, owner?.Rules is { } rules ? new Owner(rules, settingStep) : null, cancellation)
+            ? Movements.Of(plan, basis, owner?.Rules is { } rules ? new Owner(rules, settingStep) : null, Catalogue.CreepModels, cancellation)
             : null;
         return new Calculation(reading, basis, owner, settingStep, result);
     }

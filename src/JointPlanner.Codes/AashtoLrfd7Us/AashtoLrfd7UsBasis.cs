@@ -1,3 +1,4 @@
+using JointPlanner.Codes.AashtoLrfdCreep;
 using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
@@ -108,6 +109,9 @@ public sealed class AashtoLrfd7UsBasis : CodeBasis
                 Bound.Upper, Measure.Along, GapStrength, source),
         ];
     }
+
+    /// <inheritdoc/>
+    public override Answer<CreepModel> CreepModel { get; } = new From2005To2014Model();
 
     /// <inheritdoc/>
     public override string PublishedExamples =>

@@ -1,3 +1,4 @@
+using JointPlanner.Codes.En1992Part1To1Of2004;
 using JointPlanner.Engine.Bases;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
@@ -81,6 +82,9 @@ public sealed class En1991Part1To5Basis : CodeBasis
                 table = table.With(cause, column, new Counted(1.0) { Source = permanent });
         return table.With(Substructure, GapStrength, new Counted(1.2) { Source = settlement });
     }
+
+    /// <inheritdoc/>
+    public override Answer<CreepModel> CreepModel { get; } = new En1992Part1To1Of2004Model();
 
     /// <inheritdoc/>
     public override string PublishedExamples =>

@@ -57,6 +57,9 @@ public abstract class CodeBasis
     /// <summary>Bounds on each gap of a joint with several gaps.</summary>
     public virtual IReadOnlyList<Limit> ModularGapLimits(Derivation derivation) => [];
 
+    /// <summary>The model of creep and shrinkage that goes with this edition; a plan may name another, and then the result says so.</summary>
+    public virtual Answer<CreepModel> CreepModel => Silence<CreepModel>();
+
     /// <summary>Values of this basis that are held from memory and that this plan uses: what an owner must confirm by name.</summary>
     public virtual IReadOnlyList<Provenance> MemoryValues => [];
 

@@ -46,7 +46,7 @@ public static class BearingTravels
     /// <summary>Travel of a bearing line; null where the deck does not move over it.</summary>
     public static BearingTravel? Of(
         Plan plan, BearingLine bearing, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf,
-        double settingTemperature, Derivation derivation)
+        double settingTemperature, RemainingStrains strains, Derivation derivation)
     {
         if (lengths.IsEmpty) return null;
         var path = $"bearings/{bearing.Id}/setting";
@@ -55,7 +55,7 @@ public static class BearingTravels
             Range: temperatureOf(l.Segment.Id))).ToArray();
         var hot = rates.Select(r => derivation.Use(Thermal, "", r.Rate, r.Range.Max, set)).ToArray();
         var cold = rates.Select(r => derivation.Use(Thermal, "", r.Rate, r.Range.Min, set)).ToArray();
-        var shortenings = lengths.SelectMany(l => Shortenings(plan, bearing, l.Segment, l.Length, derivation)).ToArray();
+        var shortenings = lengths.SelectMany(l => Shortenings(plan, bearing, l.Segment, l.Length, strains, derivation)).ToArray();
         return new BearingTravel(bearing.Id,
             Total("hot-at-start", hot), Total("cold-at-start", cold),
             Total("hot-at-end", [.. hot, .. shortenings]), Total("cold-at-end", [.. cold, .. shortenings]));
@@ -63,15 +63,14 @@ public static class BearingTravels
         Number Total(string end, Number[] parts) => derivation.Use(Sum, Keys.TravelTotal(bearing.Id, end), parts);
     }
 
-    private static IEnumerable<Number> Shortenings(Plan plan, BearingLine bearing, Segment segment, Number length, Derivation derivation)
+    private static IEnumerable<Number> Shortenings(
+        Plan plan, BearingLine bearing, Segment segment, Number length, RemainingStrains strains, Derivation derivation)
     {
-        foreach (var (word, shortening) in new[] { ("creep", segment.Creep), ("shrinkage", segment.Shrinkage) })
+        foreach (var cause in RemainingStrains.Causes.Where(c => RemainingStrains.Has(c, segment)))
         {
-            if (shortening is null) continue;
             var age = GivenValues.Of(plan, derivation, $"bearings/{bearing.Id}/setting/deck-age", "t",
                 $"deck age when bearing line {bearing.Id} was tied at zero shear", Quantity.Age, bearing.SettingAge ?? 0);
-            var remaining = CreepAndShrinkage.RemainingStrain($"segments/{segment.Id}/{word}", word, shortening, age, derivation);
-            yield return derivation.Use(Shortening, "", remaining, length);
+            if (strains.Of(cause, segment, age, derivation) is { } remaining) yield return derivation.Use(Shortening, "", remaining, length);
         }
     }
 }

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Causes;
 using JointPlanner.Engine.Plans;
 
 namespace JointPlanner.Engine.Combining;
@@ -22,8 +23,9 @@ public static class IncludedCauses
     private static bool IsComputed(Cause cause, IReadOnlyCollection<Segment> moving) => cause switch
     {
         Cause.UniformTemperature => true,
-        Cause.Creep => moving.Where(Creeps).All(s => s.Creep is not null),
-        Cause.Shrinkage => moving.Where(Shrinks).All(s => s.Shrinkage is not null),
+        Cause.Creep => moving.Where(Creeps).All(s => RemainingStrains.Has(cause, s)),
+        Cause.Prestress => moving.Where(Creeps).All(s => RemainingStrains.Has(cause, s)),
+        Cause.Shrinkage => moving.Where(Shrinks).All(s => RemainingStrains.Has(cause, s)),
         _ => false,
     };
 

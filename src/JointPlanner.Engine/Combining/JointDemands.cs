@@ -31,6 +31,7 @@ public sealed class JointDemands
     private readonly ImmutableArray<(Segment Segment, Number Length)> lengths;
     private readonly Func<string, SegmentTemperature> temperatureOf;
     private readonly ImmutableArray<OtherPart> byFrame;
+    private readonly RemainingStrains strains;
 
     /// <summary>Demands of one joint.</summary>
     /// <param name="plan">The plan.</param>
@@ -38,10 +39,12 @@ public sealed class JointDemands
     /// <param name="lengths">Its expansion lengths.</param>
     /// <param name="temperatureOf">Temperatures of a segment.</param>
     /// <param name="byFrame">What the causes computed by the frame do to it.</param>
+    /// <param name="strains">What the segments still shorten by.</param>
     public JointDemands(
         Plan plan, Joint joint, ImmutableArray<(Segment Segment, Number Length)> lengths, Func<string, SegmentTemperature> temperatureOf,
-        ImmutableArray<OtherPart> byFrame) =>
-        (this.plan, this.joint, this.lengths, this.temperatureOf, this.byFrame) = (plan, joint, lengths, temperatureOf, byFrame);
+        ImmutableArray<OtherPart> byFrame, RemainingStrains strains) =>
+        (this.plan, this.joint, this.lengths, this.temperatureOf, this.byFrame, this.strains) =
+        (plan, joint, lengths, temperatureOf, byFrame, strains);
 
     /// <summary>The demand at a deck age at setting; null for the age that the joint's setting state gives.</summary>
     public JointDemand At(double? deckAge, Derivation derivation)
@@ -74,22 +77,16 @@ public sealed class JointDemands
 
     private IEnumerable<OtherPart> Shortenings(double? deckAge, Derivation derivation)
     {
-        foreach (var (cause, word, of) in new (Cause, string, Func<Segment, Shortening?>)[]
+        foreach (var cause in RemainingStrains.Causes)
         {
-            (Cause.Creep, "creep", s => s.Creep), (Cause.Shrinkage, "shrinkage", s => s.Shrinkage),
-        })
-        {
-            var parts = lengths.Where(l => of(l.Segment) is not null).Select(l =>
-            {
-                var remaining = CreepAndShrinkage.RemainingStrain(
-                    $"segments/{l.Segment.Id}/{word}", word, of(l.Segment)!, AgeOf(l.Segment, deckAge, derivation), derivation);
-                return (Opens: derivation.Use(CreepAndShrinkage.Opens, "", remaining, l.Length),
-                        Closes: derivation.Use(CreepAndShrinkage.Closes, "", remaining, l.Length));
-            }).ToArray();
-            if (parts.Length == 0) continue;
+            var parts = new List<(Number Opens, Number Closes)>();
+            foreach (var (segment, length) in lengths.Where(l => RemainingStrains.Has(cause, l.Segment)))
+                if (strains.Of(cause, segment, AgeOf(segment, deckAge, derivation), derivation) is { } remaining)
+                    parts.Add((derivation.Use(ShorteningMovements.Opens, "", remaining, length), derivation.Use(ShorteningMovements.Closes, "", remaining, length)));
+            if (parts.Count == 0) continue;
             yield return new OtherPart(cause,
-                derivation.Use(CreepAndShrinkage.SumOpens, Keys.OpensBy(joint.Id, cause), [.. parts.Select(p => p.Opens)]),
-                derivation.Use(CreepAndShrinkage.SumCloses, Keys.ClosesBy(joint.Id, cause), [.. parts.Select(p => p.Closes)]),
+                derivation.Use(ShorteningMovements.SumOpens, Keys.OpensBy(joint.Id, cause), [.. parts.Select(p => p.Opens)]),
+                derivation.Use(ShorteningMovements.SumCloses, Keys.ClosesBy(joint.Id, cause), [.. parts.Select(p => p.Closes)]),
                 IsIrreversible: true);
         }
     }

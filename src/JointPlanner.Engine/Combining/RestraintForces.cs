@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using JointPlanner.Engine.Causes;
 using JointPlanner.Engine.Climates;
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Frames;
@@ -13,7 +14,7 @@ internal static class RestraintForces
     private const double Negligible = 1e-9;
 
     public static ImmutableArray<RestraintForce> Of(
-        Plan plan, ExpansionLengths lengths, Func<string, SegmentTemperature> temperatureOf, Derivation derivation)
+        Plan plan, ExpansionLengths lengths, Func<string, SegmentTemperature> temperatureOf, RemainingStrains strains, Derivation derivation)
     {
         var forces = new List<RestraintForce>();
         foreach (var bearing in plan.Bearings.Where(b => b.Kind != BearingKind.Free))
@@ -21,7 +22,7 @@ internal static class RestraintForces
             var set = SettingTemperatures.Of(bearing, plan);
             var hot = ForceOn(bearing, id => temperatureOf(id).Expansion.Value * (temperatureOf(id).Max.Value - set));
             var cold = ForceOn(bearing, id =>
-                (temperatureOf(id).Expansion.Value * (temperatureOf(id).Min.Value - set)) - ShorteningOf(plan.SegmentOf(id), bearing.SettingAge ?? 0));
+                (temperatureOf(id).Expansion.Value * (temperatureOf(id).Min.Value - set)) - strains.Total(plan.SegmentOf(id), bearing.SettingAge ?? 0));
             var scale = lengths.Deck.AxialStiffnessOf(plan.SegmentOf(bearing.Segment)) * 1e-4;
             if (Math.Max(Math.Abs(hot.Force), Math.Abs(cold.Force)) < Negligible * scale) continue;
             forces.Add(new RestraintForce(bearing.Id,
@@ -43,10 +44,4 @@ internal static class RestraintForces
             Keys.RestraintForce(bearing.Id, end), "F", $"force of bearing line {bearing.Id} on the deck, up-station, {state}", Quantity.Force,
             found.Force, FrameWords.Name, found.Residual, [.. lengths.Deck.Inputs]);
     }
-
-    private static double ShorteningOf(Segment segment, double age) => Remaining(segment.Creep, age) + Remaining(segment.Shrinkage, age);
-
-    private static double Remaining(Shortening? shortening, double age) => shortening is null
-        ? 0
-        : Causes.CreepAndShrinkage.RemainingStrain("", "", shortening, new Number(-1, age), new Derivation(keepsSteps: false)).Value;
 }

@@ -10,6 +10,9 @@ internal static class Arithmetic
         return exponent < 0 ? 1 / result : result;
     }
 
+    public static double ToThe(double value, double exponent) => Math.Pow(value, exponent);
+    public static double Exp(double value) => Math.Exp(value);
+    public static double Ln(double value) => Math.Log(value);
     public static double Root(double value) => Math.Sqrt(value);
     public static double Cos(double angle) => Math.Cos(angle);
     public static double Sin(double angle) => Math.Sin(angle);

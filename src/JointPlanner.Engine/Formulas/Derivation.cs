@@ -8,6 +8,7 @@ public sealed class Derivation
 {
     private readonly List<Step>? steps;
     private readonly Dictionary<string, Number> given = [];
+    private readonly Dictionary<string, Number> shared = [];
     private readonly List<Finding> findings = [];
 
     /// <summary>A derivation that keeps its steps, or only computes.</summary>
@@ -46,6 +47,21 @@ public sealed class Derivation
         var value = formula.Compute(Array.ConvertAll(operands, o => o.Value));
         return Add(formula.Symbol, formula.Meaning, formula.Quantity, value,
             new FormulaOrigin(formula, Array.ConvertAll(operands, o => o.Step)), key);
+    }
+
+    /// <summary>One use of a formula that several components ask for: with the same operands it is listed once.</summary>
+    /// <exception cref="NotFiniteException">The result is not a number; the finding names the step.</exception>
+    public Number Once(Formula formula, params Number[] operands) =>
+        Shared($"{formula.Id}({string.Join(',', operands.Select(o => o.Step))})", () => Use(formula, "", operands));
+
+    /// <summary>A table value that several components ask for, listed once.</summary>
+    public Number TableOnce(string symbol, string meaning, Quantity quantity, double value, Provenance source, string row) =>
+        Shared(FormattableString.Invariant($"{source.Document}/{source.Edition}/{source.Place}/{row}/{symbol}/{value:R}"), () => Table(symbol, meaning, quantity, value, source, row));
+
+    private Number Shared(string key, Func<Number> make)
+    {
+        if (steps is null) return make();
+        return shared.TryGetValue(key, out var known) ? known : shared[key] = make();
     }
 
     /// <summary>An unknown of a solved model.</summary>

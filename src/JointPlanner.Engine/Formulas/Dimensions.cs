@@ -36,7 +36,11 @@ internal static class Dimensions
     public static Dimension ArgumentOf(string function, Expression argument, Dimension result) =>
         function == "√" || argument.Dimension == Dimension.None
             ? result
-            : throw new ArgumentException($"{function} wants an angle, not {argument.Dimension}.");
+            : throw new ArgumentException($"{function} wants a plain number, not {argument.Dimension}.");
+
+    public static Dimension OfRaisedTo(Expression @base, Expression exponent) => @base.Dimension == Dimension.None && exponent.Dimension == Dimension.None
+        ? Dimension.None
+        : throw new ArgumentException($"{@base.Dimension} cannot be raised to {exponent.Dimension}: both must be plain numbers.");
 
     public static Dimension OfMeasured(Expression value, Unit unit) => value.Dimension == unit.Dimension
         ? Dimension.None

@@ -53,6 +53,12 @@ public abstract record Expression
 
     /// <summary>Whole power.</summary>
     public static Expression Power(Expression a, int exponent) => new Powered(a, exponent);
+    /// <summary>A power with any exponent; both must be plain numbers.</summary>
+    public static Expression ToThe(Expression a, Expression exponent) => new RaisedTo(a, exponent);
+    /// <summary>e raised to a plain number.</summary>
+    public static Expression Exp(Expression a) => new Function("exp", a, Dimension.None);
+    /// <summary>Natural logarithm of a plain number.</summary>
+    public static Expression Ln(Expression a) => new Function("ln", a, Dimension.None);
     /// <summary>Square root.</summary>
     public static Expression Root(Expression a) => new Function("√", a, a.Dimension.Root());
     /// <summary>Cosine of an angle in radians.</summary>
@@ -101,7 +107,10 @@ public sealed record Binary(char Sign, Expression Left, Expression Right)
 /// <summary>A whole power.</summary>
 public sealed record Powered(Expression Base, int Exponent) : Expression(Base.Dimension.Power(Exponent));
 
-/// <summary>Square root, sine, cosine or hyperbolic tangent.</summary>
+/// <summary>A power whose exponent is any plain number.</summary>
+public sealed record RaisedTo(Expression Base, Expression Exponent) : Expression(Dimensions.OfRaisedTo(Base, Exponent));
+
+/// <summary>Square root, sine, cosine, hyperbolic tangent, exponential or logarithm.</summary>
 public sealed record Function(string Name, Expression Argument, Dimension Result) : Expression(Dimensions.ArgumentOf(Name, Argument, Result));
 
 /// <summary>The larger or smaller of two values.</summary>

@@ -31,6 +31,9 @@ public sealed class Formula
         compiled = new(() => Compiler.Compile(body, operands));
     }
 
+    /// <summary>The same formula where another document prints it too: its own id and source, the same expression.</summary>
+    public Formula Restated(string id, Provenance source) => new(id, Symbol, Meaning, Quantity, [.. Operands], Body, source, Example);
+
     /// <summary>Permanent id.</summary>
     public string Id { get; }
     /// <summary>Printed symbol of the result.</summary>
@@ -68,6 +71,7 @@ public sealed class Formula
     {
         Binary b => Contains(b.Left, wanted) || Contains(b.Right, wanted),
         Powered p => Contains(p.Base, wanted),
+        RaisedTo p => Contains(p.Base, wanted) || Contains(p.Exponent, wanted),
         Function f => Contains(f.Argument, wanted),
         Extreme x => Contains(x.Left, wanted) || Contains(x.Right, wanted),
         Rounded r => Contains(r.Value, wanted) || Contains(r.Step, wanted),

@@ -44,6 +44,8 @@ public sealed record Segment
     public DeadLoadToCome? DeadLoad { get; init; }
     /// <summary>Braking force on the segment; null where none is given.</summary>
     public BrakingForce? Braking { get; init; }
+    /// <summary>What the deck's concrete is, for a model of creep and shrinkage; null where the strains are the designer's own, or none.</summary>
+    public Concrete? Concrete { get; init; }
     /// <summary>Length, m.</summary>
     public double Length => End - Start;
 }

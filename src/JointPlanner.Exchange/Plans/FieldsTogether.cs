@@ -18,7 +18,11 @@ internal sealed class FieldsTogether
         check.SharedIds();
         check.References();
         foreach (var path in values.Items("supports")) check.OneStiffness(path);
-        foreach (var path in values.Items("segments")) check.OneAxialStiffness(path);
+        foreach (var path in values.Items("segments"))
+        {
+            check.OneAxialStiffness(path);
+            foreach (var fault in ConcreteMaking.Faults(path, document, values)) check.Add(fault);
+        }
         foreach (var path in values.Items("bearings")) check.StationOnSegment(path);
         check.Answers();
         check.BasisWords(known);

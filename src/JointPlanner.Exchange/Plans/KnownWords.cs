@@ -4,7 +4,7 @@ using JointPlanner.Engine.Fitting.Joints;
 
 namespace JointPlanner.Exchange.Plans;
 
-/// <summary>Words that a plan may use and that are known outside it: code editions and owners' rule sets.</summary>
+/// <summary>Words that a plan may use and that are known outside it: code editions, models of creep and shrinkage, and owners' rule sets.</summary>
 public sealed record KnownWords
 {
     /// <summary>Nothing known: code, profile, zone and owner's rules are taken as they stand, and whoever computes the plan says what it does not know.</summary>
@@ -13,6 +13,9 @@ public sealed record KnownWords
     /// <summary>Code editions; null where they are not to be checked.</summary>
     public IReadOnlyList<CodeBasis>? Bases { get; init; }
 
+    /// <summary>Models of creep and shrinkage; null where they are not to be checked.</summary>
+    public IReadOnlyList<CreepModel>? CreepModels { get; init; }
+
     /// <summary>Ids of owners' rule sets; null where they are not to be checked.</summary>
     public IReadOnlyCollection<string>? OwnerRules { get; init; }
 
@@ -20,6 +23,7 @@ public sealed record KnownWords
     {
         var words = new Dictionary<string, IReadOnlyCollection<string>> { ["family"] = [.. JointFamilies.All.Select(f => f.Word)] };
         if (OwnerRules is not null) words["owner-rules"] = OwnerRules;
+        if (CreepModels is not null) words["creep-model"] = [.. CreepModels.Select(m => m.Id)];
         if (Bases is null) return words;
         words["code"] = [.. Bases.Select(b => b.Id)];
         if (Bases.FirstOrDefault(b => b.Id == code) is not { } basis) return words;

@@ -197,6 +197,7 @@ public static class PlanFields
         Needed("segments/*/braking/source", "source of the braking force", new TextEntry(Note), "Where it comes from."),
         .. Shortening("creep", "creep"),
         .. Shortening("shrinkage", "shrinkage"),
+        .. ConcreteFields.Of("segments/*/concrete"),
 
         new("bearings", "bearings", new ListEntry(1, 8000, "bearing line") { WhyFewest = "There are no bearings: nothing carries the deck." },
             "Bearing lines: one for each segment and support, or segment that carries it.") { IsRequired = true },

@@ -125,6 +125,7 @@ internal sealed class PlanMaking
             Braking = LoadMaking.Braking(values, $"{path}/braking"),
             Creep = Shortening($"{path}/creep"),
             Shrinkage = Shortening($"{path}/shrinkage"),
+            Concrete = ConcreteMaking.Of($"{path}/concrete", values),
         };
     }
 

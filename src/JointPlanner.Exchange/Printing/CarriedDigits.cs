@@ -102,6 +102,7 @@ internal sealed class CarriedDigits
             && DecidesAlike(formula, formula.Holds(c, exact) ? c.Then : c.Otherwise, exact, printed),
         Binary b => DecidesAlike(formula, b.Left, exact, printed) && DecidesAlike(formula, b.Right, exact, printed),
         Powered p => DecidesAlike(formula, p.Base, exact, printed),
+        RaisedTo p => DecidesAlike(formula, p.Base, exact, printed) && DecidesAlike(formula, p.Exponent, exact, printed),
         Function f => DecidesAlike(formula, f.Argument, exact, printed),
         Extreme x => DecidesAlike(formula, x.Left, exact, printed) && DecidesAlike(formula, x.Right, exact, printed),
         Rounded r => DecidesAlike(formula, r.Value, exact, printed) && DecidesAlike(formula, r.Step, exact, printed),

@@ -37,6 +37,7 @@ internal sealed class FormulaNotation
         Binary { Sign: '/' } b => new Fraction(Lay(b.Left), Lay(b.Right)),
         Binary b => new Infix(Lay(b.Left), b.Sign, Lay(b.Right)),
         Powered p => new Raised(Lay(p.Base), p.Exponent),
+        RaisedTo p => new RaisedBy(Lay(p.Base), Lay(p.Exponent)),
         Function { Name: "√" } f => new Radical(Lay(f.Argument)),
         Function f => new Call(f.Name, [Lay(f.Argument)]),
         Extreme x => new Call(x.IsLarger ? "max" : "min", [Lay(x.Left), Lay(x.Right)]),

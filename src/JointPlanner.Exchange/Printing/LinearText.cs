@@ -8,9 +8,9 @@ namespace JointPlanner.Exchange.Printing;
 ///          | sum
 /// sum     := product { (" + " | " − ") product }                  from left to right
 /// product := power { (" · " | " / ") power }                      from left to right
-/// power   := atom [ raised figures ]
+/// power   := atom [ raised figures | "^" atom ]
 /// atom    := value | symbol | "(" case ")" | "√(" case ")" | name "(" sum { ", " sum } ")"
-/// name    := "cos" | "sin" | "max" | "min" | "round" | "Σ"
+/// name    := "cos" | "sin" | "exp" | "ln" | "max" | "min" | "round" | "Σ"
 /// value   := number [ " " unit ] [ " [" step "]" ]                no space before the degree sign of an angle
 /// number  := [ "−" ] figures [ "." figures ] [ "×10" raised figures ]
 /// </code>
@@ -32,6 +32,7 @@ public static class LinearText
         Infix i => $"{Within(i.Left, Rank.Sum)} {i.Sign} {Within(i.Right, Rank.Product)}",
         Fraction f => $"{Within(f.Above, Rank.Product)} / {Within(f.Below, Rank.Power)}",
         Raised r => (r.Base is ValueMark ? $"({Of(r.Base)})" : Within(r.Base, Rank.Atom)) + NumberText.Superscript(r.Exponent),
+        RaisedBy r => $"{(r.Base is ValueMark ? $"({Of(r.Base)})" : Within(r.Base, Rank.Atom))}^{Within(r.Exponent, Rank.Atom)}",
         Radical r => $"√({Of(r.Under)})",
         Call c => $"{c.Name}({string.Join(", ", c.Arguments.Select(a => Within(a, Rank.Sum)))})",
         Alternatives a => $"if {Within(a.Left, Rank.Sum)} {a.Sign} {Within(a.Right, Rank.Sum)}: {Within(a.Then, Rank.Sum)}, otherwise {Of(a.Otherwise)}",

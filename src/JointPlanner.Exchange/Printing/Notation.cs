@@ -47,10 +47,13 @@ public sealed record Fraction(Notation Above, Notation Below) : Notation(Rank.Pr
 /// <summary>A whole power.</summary>
 public sealed record Raised(Notation Base, int Exponent) : Notation(Rank.Power);
 
+/// <summary>A power with any exponent.</summary>
+public sealed record RaisedBy(Notation Base, Notation Exponent) : Notation(Rank.Power);
+
 /// <summary>A square root.</summary>
 public sealed record Radical(Notation Under) : Notation(Rank.Atom);
 
-/// <summary>A function with its arguments in brackets: cos, sin, max, min, round, Σ.</summary>
+/// <summary>A function with its arguments in brackets: cos, sin, exp, ln, max, min, round, Σ.</summary>
 public sealed record Call(string Name, ImmutableArray<Notation> Arguments) : Notation(Rank.Atom);
 
 /// <summary>Both sides of a choice, with symbols: one where the comparison holds, the other where it does not.</summary>

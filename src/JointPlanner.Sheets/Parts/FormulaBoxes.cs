@@ -17,6 +17,7 @@ internal static class FormulaBoxes
         Infix i => MathNode.Row(Within(i.Left, Rank.Sum), MathNode.Operator(i.Sign.ToString()), Within(i.Right, Rank.Product)),
         Fraction f => new Pdf.Fraction(Of(f.Above), Of(f.Below)),
         Raised r => new Script(r.Base is ValueMark ? new Parentheses(Of(r.Base)) : Within(r.Base, Rank.Atom), null, MathNode.Upright(Whole(r.Exponent))),
+        RaisedBy r => new Script(r.Base is ValueMark ? new Parentheses(Of(r.Base)) : Within(r.Base, Rank.Atom), null, Of(r.Exponent)),
         Radical r => new Root(Of(r.Under)),
         Call c => MathNode.Row([MathNode.Upright(c.Name), new Parentheses(List(c))]),
         Alternatives a => MathNode.Row(MathNode.Upright("if "), Of(a.Left), MathNode.Operator(a.Sign.ToString()), Of(a.Right), MathNode.Upright(": "), Of(a.Then),

@@ -49,7 +49,7 @@ public class KeystrokeBenchmarks
 
     /// <summary>From an accepted plan to every result, with steps and tables.</summary>
     [Benchmark(Description = "engine: plan to results")]
-    public Result Engine() => Movements.Of(plan!, basis!, owner);
+    public Result Engine() => Movements.Of(plan!, basis!, owner, Catalogue.CreepModels);
 
     /// <summary>From a changed field to every result, as the ledger does it.</summary>
     [Benchmark(Description = "keystroke: field to results")]

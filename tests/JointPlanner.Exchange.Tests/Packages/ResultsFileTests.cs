@@ -16,7 +16,7 @@ public sealed class ResultsFileTests
 
     private static StoredResults Stored(string file) => ResultsFile.Of(Computed(file), "0.1.0", Hash, null, []);
 
-    private static Result Computed(string file) => Movements.Of(Plan(file), Catalogue.Find(Plan(file).Basis.Code)!, Owner(file));
+    private static Result Computed(string file) => Movements.Of(Plan(file), Catalogue.Find(Plan(file).Basis.Code)!, Owner(file), Catalogue.CreepModels);
 
     private static Owner Owner(string file) =>
         new(OwnerRulesReader.Read(File.ReadAllBytes(Path.Combine(SeedData.Folder, "owner-rules", Plan(file).Basis.OwnerRules + ".json"))).Rules!, 0.001);

@@ -7,7 +7,7 @@ namespace JointPlanner.Recomputation.Tests.Reading;
 public readonly record struct Amount(double Value, Powers Powers);
 
 /// <summary>
-/// Computes one printed line: values with units, + − · /, powers, roots, cos, sin, max, min, round, Σ over rows, and decisions, whose comparison
+/// Computes one printed line: values with units, + − · /, powers, roots, cos, sin, exp, ln, max, min, round, Σ over rows, and decisions, whose comparison
 /// it checks. Written from the grammar that the program documents, sharing none of its code.
 /// </summary>
 public sealed partial class Calculator
@@ -86,7 +86,7 @@ public sealed partial class Calculator
     private Amount Power()
     {
         var value = Atom();
-        if (Takes("^")) return Raised(value); // a sheet raises the exponent, whose line form has this sign
+        if (Takes("^")) return Raised(value); // any exponent on a line, and a whole one where a sheet raises it
         if (at >= text.Length || text[at] is not ('⁻' or '⁰' or '¹' or '²' or '³' or '⁴' or '⁵' or '⁶' or '⁷' or '⁸' or '⁹')) return value;
         var exponent = PrintedValue.RaisedNumber(text, ref at);
         return new(Math.Pow(value.Value, exponent), value.Powers * exponent);
@@ -94,12 +94,10 @@ public sealed partial class Calculator
 
     private Amount Raised(Amount value)
     {
-        var sign = Takes("−") ? -1 : 1;
-        var start = at;
-        while (at < text.Length && char.IsAsciiDigit(text[at])) at++;
-        if (at == start) throw Unreadable();
-        var exponent = sign * int.Parse(text[start..at], CultureInfo.InvariantCulture);
-        return new(Math.Pow(value.Value, exponent), value.Powers * exponent);
+        var exponent = Plain(Takes("(") ? Closed(Case()) : Value() ?? throw Unreadable());
+        return exponent == Math.Round(exponent)
+            ? new(Math.Pow(value.Value, exponent), value.Powers * (int)exponent)
+            : new(Math.Pow(Plain(value), exponent), default);
     }
 
     private Amount Atom()
@@ -110,6 +108,8 @@ public sealed partial class Calculator
             var under = Closed(Case());
             return new(Math.Sqrt(under.Value), under.Powers.Half());
         }
+        if (Takes("exp(")) return new(Math.Exp(Plain(Closed(Sum()))), default);
+        if (Takes("ln(")) return new(Math.Log(Plain(Closed(Sum()))), default);
         if (Takes("cos(")) return new(Math.Cos(Plain(Closed(Sum()))), default);
         if (Takes("tanh(")) return new(Math.Tanh(Plain(Closed(Sum()))), default);
         if (Takes("sin(")) return new(Math.Sin(Plain(Closed(Sum()))), default);
@@ -172,7 +172,7 @@ public sealed partial class Calculator
         ? b
         : throw new FormatException($"{a.Powers} and {b.Powers} stand together");
 
-    private static double Plain(Amount angle) => angle.Powers == default ? angle.Value : throw new FormatException($"{angle.Powers} is no angle");
+    private static double Plain(Amount angle) => angle.Powers == default ? angle.Value : throw new FormatException($"{angle.Powers} is no plain number");
 
     private Amount Closed(Amount inner)
     {

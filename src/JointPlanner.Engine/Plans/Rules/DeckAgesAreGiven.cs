@@ -17,5 +17,6 @@ public sealed class DeckAgesAreGiven : PlanRule
     }
 
     /// <summary>True where how much is still to come depends on the age at setting.</summary>
-    internal static bool Develops(Segment segment) => segment.Creep is { Development.IsEmpty: false } || segment.Shrinkage is { Development.IsEmpty: false };
+    internal static bool Develops(Segment segment) =>
+        segment.Concrete is not null || segment.Creep is { Development.IsEmpty: false } || segment.Shrinkage is { Development.IsEmpty: false };
 }

@@ -1,4 +1,5 @@
 using JointPlanner.Engine.Bases;
+using JointPlanner.Engine.Causes;
 
 namespace JointPlanner.Engine.Plans.Rules;
 
@@ -28,8 +29,7 @@ public sealed class MovementsAreNotComputedToo : PlanRule
         if (movement.Cause == Cause.UniformTemperature) return true;
         var joint = check.Plan.Joints.FirstOrDefault(j => j.Id == movement.Joint);
         if (joint is not null && ComputedCauses.ByFrame(check.Plan, joint, movement.Cause)) return true;
-        if (movement.Cause is not (Cause.Creep or Cause.Shrinkage)) return false;
         return joint is not null && new[] { joint.Near, joint.Far }.Select(check.SegmentOf)
-            .Any(s => (movement.Cause == Cause.Creep ? s?.Creep : s?.Shrinkage) is not null);
+            .Any(s => s is not null && RemainingStrains.Has(movement.Cause, s));
     }
 }

@@ -10,7 +10,7 @@ public abstract class PlanRule
     [
         new SupportsInOrder(), new SegmentsInOrder(), new SpansAreUsual(), new BearingsUnderTheirSegment(), new PadsWhereTheyBelong(),
         new LayersAreWhole(), new ColumnsBuiltIn(), new ProfilesAreWhole(), new TrafficIsWhole(),
-        new JointsBetweenTwoBodies(), new OneJointAtAFace(), new DeckIsHeld(), new DevelopmentRises(), new DeckAgesAreGiven(),
+        new JointsBetweenTwoBodies(), new OneJointAtAFace(), new DeckIsHeld(), new DevelopmentRises(), new ConcreteFitsItsDeck(), new DeckAgesAreGiven(),
         new BearingSettingsAreGiven(), new SettingNotBeforeLeastAge(), new ClimateInOrder(), new MovementsAreNotComputedToo(), new SettingTableHasRows(),
     ];
 

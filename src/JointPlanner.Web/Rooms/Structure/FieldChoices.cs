@@ -18,6 +18,7 @@ internal static class FieldChoices
         WordEntry words => [.. words.Words.Select(w => (w, w.Replace('-', ' ')))],
         ReferenceEntry reference => [.. reference.Lists.SelectMany(list => bench.Document.Items(list).Select(id => (id, Mark(bench, list, id))))],
         OutsideWordEntry { Of: "code" } => [.. (bench.Known.Bases ?? []).Select(b => (b.Id, b.Title))],
+        OutsideWordEntry { Of: "creep-model" } => [.. (bench.Known.CreepModels ?? []).Select(m => (m.Id, m.Title))],
         OutsideWordEntry { Of: "owner-rules" } => [.. (bench.Known.OwnerRules ?? []).Select(r => (r, r.Replace('-', ' ')))],
         OutsideWordEntry { Of: "zone" } => Words(Basis(bench)?.ClimateZones),
         OutsideWordEntry { Of: "profile" } => Words(Basis(bench)?.Profiles),

@@ -9,7 +9,7 @@ namespace JointPlanner.Web.Rooms.Structure;
 public sealed class PlanDesk(OwnerRuleShelf shelf)
 {
     /// <summary>Words that a plan may use.</summary>
-    public KnownWords Known { get; } = new() { Bases = Catalogue.All, OwnerRules = shelf.Ids };
+    public KnownWords Known { get; } = new() { Bases = Catalogue.All, CreepModels = Catalogue.CreepModels, OwnerRules = shelf.Ids };
 
     /// <summary>Rule sets by id, with their names.</summary>
     public IEnumerable<(string Id, string Name)> RuleNames => shelf.Names;

@@ -29,7 +29,7 @@ public sealed partial class JointBand
     // Ages are asked for only where a deck at the joint shortens.
     private IEnumerable<string> Shortening(string path) => ((string[])["near", "far"]).Where(side =>
         Bench.Document.Has($"{path}/setting/{side}-deck-age")
-        || (Bench.Document.TextAt($"{path}/{side}") is { } body && (Bench.Document.Has($"segments/{body}/creep") || Bench.Document.Has($"segments/{body}/shrinkage"))));
+        || (Bench.Document.TextAt($"{path}/{side}") is { } body && new[] { "creep", "shrinkage", "concrete" }.Any(word => Bench.Document.Has($"segments/{body}/{word}"))));
 
     private Task Add() => Bench.Take(PlanParts.WithJoint(Bench.Document, Bench.UsedIds("joints")), "joints");
 }

@@ -1,22 +1,18 @@
 using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
-using static JointPlanner.Engine.Formulas.Expression;
 
 namespace JointPlanner.Engine.Causes;
 
-/// <summary>Shortening of the deck that is still to come after a setting state, from a strain and its development as the designer gives them.</summary>
-public static class CreepAndShrinkage
+/// <summary>Strain still to come after a setting state where the designer gives strain and development.</summary>
+public static class OwnStrain
 {
     private static readonly Operand Strain = new("ε", "strain at the end of life, shortening positive", Quantity.Strain);
     private static readonly Operand Share = new("s", "share of it over at setting", Quantity.Ratio);
-    private static readonly Operand Remaining = new("ε_r", "strain still to come after setting", Quantity.Strain);
-    private static readonly Operand Length = new("L", "expansion length of the joint for this segment", Quantity.Length);
     private static readonly Operand Age = new("t", "deck age at setting", Quantity.Age);
     private static readonly Operand Before = new("t_1", "age before it in the given development", Quantity.Age);
     private static readonly Operand After = new("t_2", "age after it", Quantity.Age);
     private static readonly Operand ShareBefore = new("s_1", "share over at the age before", Quantity.Ratio);
     private static readonly Operand ShareAfter = new("s_2", "share over at the age after", Quantity.Ratio);
-    private static readonly Operand Part = new("Δ_j", "part of one segment", Quantity.Movement);
 
     private static readonly Provenance OneCurve = Provenance.Derived("what is still to come is the difference of one curve from setting to the end of life");
 
@@ -32,34 +28,13 @@ public static class CreepAndShrinkage
         "shortening.still-to-come", "ε_r", "strain still to come after setting", Quantity.Strain, [Strain, Share],
         Strain * (1 - Share), OneCurve, new(160e-6, 1e-9, "own arithmetic", 200e-6, 0.2));
 
-    /// <summary>How far the shortening of one segment opens a joint.</summary>
-    public static readonly Formula Opens = new(
-        "shortening.opens", "Δ_j", "opening by the shortening of one segment", Quantity.Movement, [Remaining, Length],
-        Positive(Remaining * Length, Quantity.Movement), OneCurve, new(0.0048768, 1e-7,
-            "own arithmetic: 160 millionths of 30.48 m are 4.8768 mm", 160e-6, 30.48));
-
-    /// <summary>How far the shortening of one segment closes a joint whose face it pulls toward the other.</summary>
-    public static readonly Formula Closes = new(
-        "shortening.closes", "Δ_j", "closing by the shortening of one segment", Quantity.Movement, [Remaining, Length],
-        Positive(-1 * (Remaining * Length), Quantity.Movement), OneCurve, new(0.001, 1e-9, "own arithmetic", 100e-6, -10));
-
-    /// <summary>All segments that open.</summary>
-    public static readonly Formula SumOpens = new(
-        "shortening.opens-by", "Δ_opens", "the joint opens by shortening still to come", Quantity.Movement, [Part], Total(Part),
-        Provenance.Derived("opening parts count in opening only"), new(0.03, 1e-12, "own arithmetic", 0.01, 0.02));
-
-    /// <summary>All segments that close.</summary>
-    public static readonly Formula SumCloses = new(
-        "shortening.closes-by", "Δ_closes", "the joint closes by shortening still to come", Quantity.Movement, [Part], Total(Part),
-        Provenance.Derived("closing parts count in closing only"), new(0.03, 1e-12, "own arithmetic", 0.01, 0.02));
-
     /// <summary>Strain still to come after a deck age, as steps.</summary>
     /// <param name="path">Path of the shortening in the plan.</param>
     /// <param name="name">What it is called in the steps: creep or shrinkage.</param>
     /// <param name="shortening">Strain and development.</param>
     /// <param name="age">Deck age at the setting state, s.</param>
     /// <param name="derivation">Where the steps go.</param>
-    public static Number RemainingStrain(string path, string name, Shortening shortening, Number age, Derivation derivation)
+    public static Number ToCome(string path, string name, Shortening shortening, Number age, Derivation derivation)
     {
         var strain = derivation.Given($"{path}/strain", "ε", $"{name} strain at the end of life", Quantity.Strain, shortening.Strain, shortening.Source);
         return derivation.Use(StillToCome, "", strain, ShareAt(path, name, shortening, age, derivation));
