@@ -50,7 +50,12 @@ internal sealed class JointCalculation(Plan plan, CodeBasis basis, Owner? owner,
         var temperatures = TableTemperatures.Of(plan.SettingTable,
             demand.Thermal.Select(p => p.Min.Value).DefaultIfEmpty(set).Max(), demand.Thermal.Select(p => p.Max.Value).DefaultIfEmpty(set).Min());
         var withoutSteps = new Derivation(keepsSteps: false);
-        return SettingTable.Of(demand, temperatures, plan.SettingTable.Ages, age => demands.At(age, withoutSteps), size, manner, derivation);
+        return SettingTable.Of(demand, temperatures, plan.SettingTable.Ages, age => demands.At(age, withoutSteps), size, manner, derivation) with
+        {
+            Remake = (row, going) => SettingRows.At(
+                going.Given($"setting-table/row/{demand.Joint.Id}", "T", "structure temperature of this row", Quantity.Temperature, row.Temperature, "row of the setting table"),
+                row.DeckAge is { } age && age != demand.DeckAge ? demands.At(age, going) : demand, size, manner, going),
+        };
     }
 
     private CodeGapLimits CodeLimits(Joint joint)

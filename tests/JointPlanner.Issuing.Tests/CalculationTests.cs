@@ -41,6 +41,33 @@ public sealed class CalculationTests
         Assert.Equal(document.ToUtf8(), other.With("display", document.TextAt("display")!).ToUtf8());
     }
 
+    [Theory]
+    [MemberData(nameof(SeedData.StructureNames), MemberType = typeof(SeedData))]
+    public void Every_row_of_every_setting_table_explains_its_own_numbers_bit_for_bit(string name)
+    {
+        var result = Calculation.Of(SeedData.Structure(name), SeedData.Shelf).Result!;
+        var (kept, explained) = (result.Steps.Count, 0);
+        foreach (var table in result.Joints.Select(j => j.Table!))
+            foreach (var row in table.Rows.Where(r => r.Set is not null))
+            {
+                var derivation = Derivation.Continuing(result.Steps);
+                var again = table.Explained(row, derivation);
+                (Number? Shown, Number? Explained)[] pairs =
+                [
+                    (row.Set, again.Set), (row.Minus, again.Minus), (row.Plus, again.Plus), (row.Window?.Least, again.Window?.Least),
+                    (row.Window?.Greatest, again.Window?.Greatest), (row.Along?.Set, again.Along?.Set),
+                ];
+                Assert.All(pairs, pair =>
+                {
+                    Assert.Equal(pair.Shown?.Value, pair.Explained?.Value);
+                    Assert.Equal(pair.Explained?.Value, pair.Explained is { } number ? derivation.Steps[number.Step].Value : null);
+                });
+                explained++;
+            }
+        Assert.True(explained > 5, $"{explained} rows");
+        Assert.Equal(kept, result.Steps.Count);
+    }
+
     [Fact]
     public void A_cause_that_nobody_gave_is_named_and_stops_the_issue()
     {

@@ -14,6 +14,17 @@ public sealed class Derivation
     /// <summary>A derivation that keeps its steps, or only computes.</summary>
     public Derivation(bool keepsSteps = true) => steps = keepsSteps ? [] : null;
 
+    /// <summary>A derivation that goes on from steps made before, so that a number computed without steps can be explained afterwards. The steps it starts from are copied.</summary>
+    /// <param name="made">Steps of a finished calculation.</param>
+    public static Derivation Continuing(IReadOnlyList<Step> made)
+    {
+        var going = new Derivation();
+        going.steps!.AddRange(made);
+        foreach (var step in made)
+            if (step.Origin is GivenOrigin { Path: var path }) going.given.TryAdd(path, new Number(step.Index, step.Value));
+        return going;
+    }
+
     /// <summary>Steps in order of making; empty where they are not kept.</summary>
     public IReadOnlyList<Step> Steps => steps ?? [];
 

@@ -20,6 +20,16 @@ public sealed record SettingTable(
     /// <summary>The row at the joint's expected setting temperature and age, the one whose steps the sheet derives.</summary>
     public required SettingRow Design { get; init; }
 
+    /// <summary>Makes a row once more, into a derivation of the asker's; null for a table that was made without its joint.</summary>
+    internal Func<SettingRow, Derivation, SettingRow>? Remake { get; init; }
+
+    /// <summary>A row of this table with the steps that lead to its numbers. The numbers are the row's own, bit for bit.</summary>
+    /// <param name="row">A row of this table.</param>
+    /// <param name="derivation">Goes on from the steps of the calculation that this table belongs to.</param>
+    /// <exception cref="InvalidOperationException">The table was made without its joint.</exception>
+    public SettingRow Explained(SettingRow row, Derivation derivation) =>
+        Remake is { } remake ? remake(row, derivation) : throw new InvalidOperationException("This table does not know the joint that it was made for.");
+
     /// <summary>The table of one joint. Steps are kept for the design row; the other rows go through the same formulas without keeping theirs.</summary>
     /// <param name="design">What the joint must take when set at its own deck age.</param>
     /// <param name="temperatures">Temperatures to tabulate, °C.</param>

@@ -1,4 +1,5 @@
 using JointPlanner.Engine;
+using JointPlanner.Engine.Formulas;
 using JointPlanner.Engine.Plans;
 using JointPlanner.Exchange.Plans;
 using JointPlanner.Exchange.Printing;
@@ -12,8 +13,8 @@ public sealed class Workbench : IDisposable
     private readonly LiveCalculation<PlanDocument, Calculation> calculation;
     private readonly PlanHistory history;
     private StepPrinter? printer;
-    private (Result? Of, IReadOnlyDictionary<string, Engine.Formulas.Step>? Steps) keyed;
-    private (IReadOnlyList<Engine.Formulas.Step>? Steps, DisplayProfile? Profile) printed;
+    private (Result? Of, IReadOnlyDictionary<string, Step>? Steps) keyed;
+    private (IReadOnlyList<Step>? Steps, DisplayProfile? Profile) printed;
 
     /// <summary>Opens a document.</summary>
     /// <param name="document">As it was last saved.</param>
@@ -47,7 +48,7 @@ public sealed class Workbench : IDisposable
     public Result? Result => Outcome.Result;
 
     /// <summary>The number under a result key; null where there is none.</summary>
-    public Engine.Formulas.Number? Find(string key)
+    public Number? Find(string key)
     {
         if (Result is not { } result) return null;
         if (!ReferenceEquals(keyed.Of, result)) keyed = (result, result.ByKey());
@@ -60,8 +61,8 @@ public sealed class Workbench : IDisposable
     /// <summary>What redo would do again.</summary>
     public string? Redoable => history.Redoable;
 
-    /// <summary>Step whose derivation is unfolded; null for none.</summary>
-    public int? Unfolded { get; private set; }
+    /// <summary>The number whose derivation is unfolded; null for none.</summary>
+    public Unfolding? Unfolded { get; private set; }
 
     /// <summary>Told after each change of document, outcome or unfolded number.</summary>
     public event Action? Changed;
@@ -105,14 +106,30 @@ public sealed class Workbench : IDisposable
     /// <summary>Shows how a number came about, or folds it again.</summary>
     public void Unfold(int step)
     {
-        Unfolded = Unfolded == step || step < 0 ? null : step;
+        if (Result is { } result && step >= 0) Unfold(new Unfolding(IdOf(step), result.Steps, [step], result.Steps[step].Meaning));
+    }
+
+    /// <summary>Shows how a number came about whose steps are not among those kept, or folds it again.</summary>
+    public void Unfold(Unfolding number)
+    {
+        Unfolded = Unfolded?.Id == number.Id ? null : number;
         Changed?.Invoke();
     }
 
-    /// <summary>Prints steps in the reader's units.</summary>
+    /// <summary>Folds what is unfolded.</summary>
+    public void Fold()
+    {
+        Unfolded = null;
+        Changed?.Invoke();
+    }
+
+    /// <summary>True where this step is what is unfolded.</summary>
+    public bool IsUnfolded(int step) => Unfolded?.Id == IdOf(step);
+
+    /// <summary>Prints the unfolded steps in the reader's units.</summary>
     public StepPrinter Printer(DisplayProfile profile)
     {
-        var steps = Result?.Steps ?? [];
+        var steps = Unfolded?.Steps ?? Result?.Steps ?? [];
         if (printer is null || !ReferenceEquals(printed.Steps, steps) || printed.Profile != profile)
             (printer, printed) = (new StepPrinter(steps, profile), (steps, profile));
         return printer;
@@ -127,8 +144,18 @@ public sealed class Workbench : IDisposable
         if (await calculation.Newest(Document) is not { } outcome) return;
         Outcome = outcome;
         Drawn = outcome.Reading.Plan ?? Drawn;
-        // Steps are counted anew with each calculation: an open derivation would show another number's way.
-        if (Unfolded >= (Result?.Steps.Count ?? 0)) Unfolded = null;
+        Unfolded = Unfolded is { Wanted: [var wanted] } open && open.Id == IdOf(wanted) ? Again(open.Steps[wanted]) : null;
         Changed?.Invoke();
     }
+
+    // Steps are counted anew with each calculation: the same number is the one of the same key, else the one that stands in the same place and means the same.
+    private Unfolding? Again(Step before)
+    {
+        var now = before.Key.Length > 0 ? Find(before.Key)?.Step : before.Index;
+        return now is { } index && index < Result?.Steps.Count && Result.Steps[index].Meaning == before.Meaning && Result.Steps[index].Symbol == before.Symbol
+            ? new Unfolding(IdOf(index), Result.Steps, [index], before.Meaning)
+            : null;
+    }
+
+    private static string IdOf(int step) => FormattableString.Invariant($"step {step}");
 }
