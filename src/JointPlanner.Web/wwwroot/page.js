@@ -7,6 +7,7 @@ window.jointPlanner = {
     link.click();
     setTimeout(() => URL.revokeObjectURL(link.href), 10000);
   },
+  newest: list => lead([...document.querySelectorAll(`[data-column^="${CSS.escape(list)}/"]`)].at(-1)?.dataset.column ?? ''),
   copy: async text => {
     try { await navigator.clipboard.writeText(text); return true; } catch { return false; }
   },
@@ -25,8 +26,7 @@ function lead(path) {
   if (!place) return;
   for (let around = place.parentElement; around; around = around.parentElement) if (around.tagName === 'DETAILS') around.open = true;
   place.scrollIntoView({ block: 'center', inline: 'center' });
-  if (place.tabIndex < 0) place.tabIndex = -1;
-  place.focus();
+  (place.matches('[data-column]') ? place.querySelector('input, select') : place)?.focus({ preventScroll: true });
 }
 document.addEventListener('click', event => {
   const led = event.target.closest?.('[data-leads]');

@@ -41,7 +41,9 @@ public sealed class SheetToSignatureTests : IDisposable
         var bytes = File.ReadAllBytes(signed);
         bytes[1000] ^= 1;
         File.WriteAllBytes(signed, bytes);
-        Assert.NotEqual(ExitCodes.Done, Ran.Of("verify", signed).ExitCode);
+        var verified = Ran.Of("verify", signed);
+        Assert.Equal(ExitCodes.CannotBeIssued, verified.ExitCode);
+        Assert.Contains("Field designer\n  unchanged? Broken: ", verified.Output, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -50,7 +52,7 @@ public sealed class SheetToSignatureTests : IDisposable
         var (key, _) = Key(DateTimeOffset.UtcNow.AddDays(30));
         var ran = Sign(Sheet("sheet.pdf"), key, "wrong", At("signed.pdf"));
         Assert.Equal(ExitCodes.FaultyInput, ran.ExitCode);
-        Assert.Contains("password", ran.Error, StringComparison.Ordinal);
+        Assert.Equal($"--key {key}: The password does not open the key file. Type it again; upper and lower case differ.\n", ran.Error);
         Assert.False(File.Exists(At("signed.pdf")));
     }
 
@@ -60,7 +62,8 @@ public sealed class SheetToSignatureTests : IDisposable
         var (key, _) = Key(DateTimeOffset.UtcNow.AddDays(-1));
         var ran = Sign(Sheet("sheet.pdf"), key, Password, At("signed.pdf"));
         Assert.Equal(ExitCodes.FaultyInput, ran.ExitCode);
-        Assert.Contains("Not signed", ran.Error, StringComparison.Ordinal);
+        Assert.Matches(@"^Not signed: The certificate of .*Dana Designer.* expired on \d{4}-\d\d-\d\d .* UTC; the signing time is .* UTC\. Sign with a renewed certificate\.\n$", ran.Error);
+        Assert.False(File.Exists(At("signed.pdf")));
     }
 
     [Fact]
@@ -68,6 +71,10 @@ public sealed class SheetToSignatureTests : IDisposable
     {
         File.WriteAllText(At("note.pdf"), "%PDF-1.7 hello");
         Assert.Equal(ExitCodes.FaultyInput, Ran.Of("verify", At("note.pdf")).ExitCode);
+        File.WriteAllBytes(At("foreign.pdf"), ForeignPdf());
+        var foreign = Ran.Of("verify", At("foreign.pdf"));
+        Assert.Equal(ExitCodes.FaultyInput, foreign.ExitCode);
+        Assert.StartsWith("The file was not made by this program: it lacks ", foreign.Output, StringComparison.Ordinal);
         var unsigned = Ran.Of("verify", Sheet("sheet.pdf"));
         Assert.Equal(ExitCodes.CannotBeIssued, unsigned.ExitCode);
         Assert.Contains("no signature", unsigned.Output, StringComparison.Ordinal);
@@ -80,6 +87,23 @@ public sealed class SheetToSignatureTests : IDisposable
         var ran = Ran.Of("sheet", Plan, "--date", "2026-05-31", "--out", sheet);
         Assert.Equal(ExitCodes.WrongUsage, ran.ExitCode);
         Assert.Contains("--out", ran.Error, StringComparison.Ordinal);
+    }
+
+    /// <summary>A whole PDF of one empty page, made by nobody's program.</summary>
+    private static byte[] ForeignPdf()
+    {
+        string[] objects = ["<</Type/Catalog/Pages 2 0 R>>", "<</Type/Pages/Kids[3 0 R]/Count 1>>", "<</Type/Page/Parent 2 0 R/MediaBox[0 0 99 99]/Resources<<>>>>"];
+        var (text, offsets) = (new System.Text.StringBuilder("%PDF-1.4\n"), new List<int>());
+        for (var i = 0; i < objects.Length; i++)
+        {
+            offsets.Add(text.Length);
+            text.Append(System.Globalization.CultureInfo.InvariantCulture, $"{i + 1} 0 obj\n{objects[i]}\nendobj\n");
+        }
+        var table = text.Length;
+        text.Append("xref\n0 4\n0000000000 65535 f \n");
+        foreach (var offset in offsets) text.Append(System.Globalization.CultureInfo.InvariantCulture, $"{offset:D10} 00000 n \n");
+        text.Append(System.Globalization.CultureInfo.InvariantCulture, $"trailer\n<</Size 4/Root 1 0 R>>\nstartxref\n{table}\n%%EOF\n");
+        return System.Text.Encoding.ASCII.GetBytes(text.ToString());
     }
 
     private static string Plan => SeedData.Structure("plover-flats-bridge");

@@ -12,8 +12,10 @@ public sealed class LiveCalculation<TGiven, TFound>(Func<TGiven, CancellationTok
     /// <summary>Computes; null where a newer one has taken its place.</summary>
     public async Task<TFound?> Newest(TGiven given)
     {
-        if (running is not null) await running.CancelAsync();
-        var mine = running = new CancellationTokenSource();
+        // Newest from this moment on: a call that comes while the older one is still being stopped must not be overtaken by this one.
+        var mine = new CancellationTokenSource();
+        var before = Interlocked.Exchange(ref running, mine);
+        if (before is not null) await before.CancelAsync();
         var entered = false;
         try
         {
