@@ -18,7 +18,7 @@ public sealed class WrongSignatureTests(RunningSite site) : IClassFixture<Runnin
         await designer.Open("Kestrel Lane Overbridge");
         await designer.Page.ClickAsync("a.revision");
         await designer.Page.ClickAsync("text=Freeze for checking");
-        await Assertions.Expect(designer.Page.Locator("h1 .state")).ToHaveTextAsync("in check");
+        await Assertions.Expect(designer.Page.Locator("h1 .state")).ToHaveTextAsync("in check", new() { Timeout = 30_000 });
         var revision = new Uri(designer.Page.Url).AbsolutePath;
         var sheet = await Sheet(designer, revision);
 

@@ -58,13 +58,13 @@ public abstract class LedgerTest : MudTest
 
     protected void Open(PlanDocument document, bool isReadOnly = false) => Bench = new Workbench(document, Desk.Known, Desk.Compute, isReadOnly);
 
-    /// <summary>Types into a field as a person does.</summary>
+    /// <summary>Types into a field as a person does. On the renderer's own thread: an entry made while a result is being drawn would meet a handler that is just being replaced.</summary>
     protected static void Type<TPart>(IRenderedComponent<TPart> cut, string path, string text)
-        where TPart : IComponent => cut.Find($"input[data-path='{path}']").Input(text);
+        where TPart : IComponent => cut.InvokeAsync(() => cut.Find($"input[data-path='{path}']").Input(text)).GetAwaiter().GetResult();
 
     /// <summary>Chooses in a field with fixed words.</summary>
     protected static void Choose<TPart>(IRenderedComponent<TPart> cut, string path, string word)
-        where TPart : IComponent => cut.Find($"select[data-path='{path}']").Change(word);
+        where TPart : IComponent => cut.InvokeAsync(() => cut.Find($"select[data-path='{path}']").Change(word)).GetAwaiter().GetResult();
 
     /// <summary>What stands beside a field once it is there.</summary>
     protected static IElement Beside<TPart>(IRenderedComponent<TPart> cut, string path, string kind = ".fault")
