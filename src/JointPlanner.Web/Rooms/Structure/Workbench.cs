@@ -73,6 +73,11 @@ public sealed class Workbench : IDisposable
     /// <summary>Writes a field's text as typed.</summary>
     public Task Write(string path, string? text) => Take(Document.With(path, text), path);
 
+    /// <summary>Whether the document has a place for a text at this path: a field of a plan, in an item that is still there.</summary>
+    public bool CanHold(string path) =>
+        PlanFields.Table.At(path) is { Entry: not (Exchange.Documents.GroupEntry or Exchange.Documents.ListEntry) }
+        && (path.Split('/') is not [var list, var item, _, ..] || PlanFields.Table.At(list) is not { Entry: Exchange.Documents.ListEntry } || Document.Items(list).Contains(item));
+
     /// <summary>Takes a changed document.</summary>
     /// <param name="document">The document.</param>
     /// <param name="act">What was changed, for undo.</param>
@@ -89,6 +94,7 @@ public sealed class Workbench : IDisposable
     /// <summary>Takes the last change back.</summary>
     public Task Undo()
     {
+        if (Undoable is null) return Task.CompletedTask;
         history.Undo();
         return Recompute();
     }
@@ -96,6 +102,7 @@ public sealed class Workbench : IDisposable
     /// <summary>Does it again.</summary>
     public Task Redo()
     {
+        if (Redoable is null) return Task.CompletedTask;
         history.Redo();
         return Recompute();
     }
