@@ -4,6 +4,7 @@ using JointPlanner.Issuing.Setting;
 using JointPlanner.Web.Rooms.Accounts;
 using JointPlanner.Web.Rooms.Revisions;
 using JointPlanner.Web.Rooms.Structure;
+using JointPlanner.Web.Rooms.Structures;
 using JointPlanner.Web.Shell;
 using JointPlanner.Web.Start;
 using MudBlazor.Services;
@@ -40,16 +41,15 @@ builder.AddRateLimits();
 builder.Services.AddSingleton<RevisionDesk>();
 builder.Services.AddSingleton<SetDayDesk>();
 builder.Services.AddSingleton<FormSays>();
+builder.Services.AddSingleton<FirstDraft>();
 
 var app = builder.Build();
 
 app.UseForwardedHeaders();
 app.UseMiddleware<SecurityHeaders>();
-if (!app.Environment.IsDevelopment())
-{
-    app.UseExceptionHandler("/error", createScopeForErrors: true);
-    app.UseHsts();
-}
+var isDemo = app.Services.GetRequiredService<DemoMode>().IsOn;
+if (isDemo || !app.Environment.IsDevelopment()) app.UseExceptionHandler("/error", createScopeForErrors: true);
+if (!app.Environment.IsDevelopment()) app.UseHsts();
 
 app.UseStatusCodePagesWithReExecute("/status/{0}");
 app.UseAuthentication();

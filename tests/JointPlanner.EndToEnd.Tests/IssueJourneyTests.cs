@@ -1,3 +1,4 @@
+using JointPlanner.EndToEnd.Tests.Sites;
 using JointPlanner.Pdf.Verifying;
 
 namespace JointPlanner.EndToEnd.Tests;

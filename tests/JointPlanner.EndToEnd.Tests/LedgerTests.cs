@@ -1,5 +1,6 @@
 using System.Globalization;
 using System.Text.Json;
+using JointPlanner.EndToEnd.Tests.Sites;
 using Microsoft.Playwright;
 
 namespace JointPlanner.EndToEnd.Tests;

@@ -1,4 +1,5 @@
 using JointPlanner.Archive.People;
+using JointPlanner.Web.Shared;
 using Microsoft.AspNetCore.Components.Authorization;
 using Microsoft.AspNetCore.Components.Server;
 using Microsoft.AspNetCore.Identity;
@@ -12,6 +13,19 @@ internal sealed class StillWelcome(ILoggerFactory logs, IServiceScopeFactory sco
     protected override TimeSpan RevalidationInterval => TimeSpan.FromMinutes(2);
 
     protected override async Task<bool> ValidateAuthenticationStateAsync(AuthenticationState authenticationState, CancellationToken cancellationToken)
+    {
+        try
+        {
+            return await IsWelcome(authenticationState);
+        }
+        catch (Exception problem) when (ArchiveSilence.Is(problem))
+        {
+            // Nobody is put out with work in their hands because the archive is down: nothing can be done or read without it, and the next look asks again.
+            return true;
+        }
+    }
+
+    private async Task<bool> IsWelcome(AuthenticationState authenticationState)
     {
         await using var scope = scopes.CreateAsyncScope();
         var people = scope.ServiceProvider.GetRequiredService<UserManager<Person>>();

@@ -1,4 +1,5 @@
-// The little that the server cannot do: remember two choices in this browser, hand out a file or a copy, and lead from a drawn thing or a fault to its place.
+// The little that the server cannot do: remember two choices in this browser, say its time zone, hand out a file or a copy, and lead from a drawn thing or a fault to its place.
+let came = null;
 window.jointPlanner = {
   save: (name, kind, text) => {
     const link = document.createElement('a');
@@ -11,6 +12,10 @@ window.jointPlanner = {
     try { await navigator.clipboard.writeText(text); return true; } catch { return false; }
   },
   remember: (name, value) => { document.cookie = `${name}=${value}; Path=/; Max-Age=31536000; SameSite=Lax`; },
+  zone: () => Intl.DateTimeFormat().resolvedOptions().timeZone ?? '',
+  enter: selector => { came = document.activeElement; document.querySelector(selector)?.focus({ preventScroll: true }); },
+  back: () => { if (came?.isConnected) came.focus({ preventScroll: true }); },
+  focus: selector => document.querySelector(selector)?.focus(),
   paper: value => { document.documentElement.dataset.theme = value; window.jointPlanner.remember('paper', value); },
 };
 function follow(drawn) {
@@ -33,8 +38,19 @@ document.addEventListener('click', event => {
   if (led) { lead(led.dataset.leads); return; }
   const drawn = event.target.closest?.('.picture [data-path]');
   if (drawn) follow(drawn);
+  // The router scrolls to the content and leaves the focus where it was.
+  if (event.target.closest?.('.skip')) document.getElementById('content').focus();
 });
+// Esc folds what is open round the focus, else the open derivation, and leads back to what opened it.
+function fold(at) {
+  const round = at.closest?.('.person[open], .more[open]');
+  if (round) { round.open = false; round.querySelector('summary').focus(); return true; }
+  const button = document.querySelector('[data-act="fold"]');
+  button?.click();
+  return button !== null;
+}
 document.addEventListener('keydown', event => {
+  if (event.key === 'Escape' && fold(event.target)) { event.preventDefault(); return; }
   const drawn = (event.key === 'Enter' || event.key === ' ') && event.target.closest?.('.picture [data-path]');
   if (drawn) { event.preventDefault(); follow(drawn); return; }
   if (!(event.ctrlKey || event.metaKey) || event.altKey) return;

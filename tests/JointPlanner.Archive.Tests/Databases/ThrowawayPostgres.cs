@@ -1,7 +1,3 @@
-using System.Diagnostics;
-using System.Globalization;
-using System.Net;
-using System.Net.Sockets;
 using JointPlanner.Archive.Tests.Databases;
 using Npgsql;
 
@@ -16,7 +12,7 @@ namespace JointPlanner.Archive.Tests.Databases;
 public sealed class ThrowawayPostgres : IAsyncLifetime
 {
     private const string Variable = "JOINTPLANNER_TEST_POSTGRES";
-    private string? _folder;
+    private PostgresCluster? _started;
 
     /// <summary>Connection string of a superuser.</summary>
     public static string Server { get; private set; } = "";
@@ -32,50 +28,12 @@ public sealed class ThrowawayPostgres : IAsyncLifetime
     {
         await TestDatabase.ForgetTemplates();
         NpgsqlConnection.ClearAllPools();
-        if (_folder is null) return;
-        await Run(Binary("pg_ctl"), "-D", Path.Combine(_folder, "data"), "-m", "immediate", "stop");
-        Directory.Delete(_folder, recursive: true);
+        if (_started is not null) await _started.DisposeAsync();
     }
 
     private async Task<string> Start()
     {
-        _folder = Directory.CreateTempSubdirectory("joint-planner-postgres-").FullName;
-        if (IsRoot) await Execute("chown", ["postgres", _folder]);
-        var data = Path.Combine(_folder, "data");
-        await Run(Binary("initdb"), "-D", data, "-U", "postgres", "-A", "trust", "-E", "UTF8", "--locale=C.UTF-8", "--no-sync", "--no-instructions");
-        var port = FreePort().ToString(CultureInfo.InvariantCulture);
-        var options = $"-c listen_addresses=127.0.0.1 -c port={port} -c unix_socket_directories={_folder} -c fsync=off -c synchronous_commit=off -c full_page_writes=off -c max_connections=200";
-        await Run(Binary("pg_ctl"), "-D", data, "-l", Path.Combine(_folder, "log"), "-w", "-o", options, "start");
-        return $"Host=127.0.0.1;Port={port};Username=postgres;Database=postgres";
-    }
-
-    private static bool IsRoot => Environment.UserName == "root";
-
-    // initdb and postgres refuse root.
-    private Task Run(string program, params string[] arguments) =>
-        IsRoot ? Execute("runuser", ["-u", "postgres", "--", program, .. arguments]) : Execute(program, arguments);
-
-    private async Task Execute(string program, string[] arguments)
-    {
-        // Through a shell that closes the streams: the server would inherit a pipe and keep it open.
-        var start = new ProcessStartInfo("/bin/sh") { WorkingDirectory = _folder! };
-        foreach (var argument in (string[])["-c", "\"$@\" >/dev/null 2>&1 </dev/null", "sh", program, .. arguments]) start.ArgumentList.Add(argument);
-        using var process = Process.Start(start)!;
-        await process.WaitForExitAsync();
-        if (process.ExitCode != 0) throw new InvalidOperationException($"{program} ended with {process.ExitCode}; PostgreSQL is needed for these tests (or {Variable}).");
-    }
-
-    private static string Binary(string name)
-    {
-        var versions = Directory.Exists("/usr/lib/postgresql") ? Directory.GetDirectories("/usr/lib/postgresql") : [];
-        var found = versions.Order(StringComparer.Ordinal).Select(version => Path.Combine(version, "bin", name)).LastOrDefault(File.Exists);
-        return found ?? throw new InvalidOperationException($"PostgreSQL's {name} is not installed: install the server package of Debian (postgresql) or set {Variable}.");
-    }
-
-    private static int FreePort()
-    {
-        using var listener = new TcpListener(IPAddress.Loopback, 0);
-        listener.Start();
-        return ((IPEndPoint)listener.LocalEndpoint).Port;
+        _started = await PostgresCluster.Make($"or {Variable}");
+        return _started.ConnectionString;
     }
 }

@@ -10,6 +10,7 @@ internal static class FieldPlace
     {
         if (path.Length == 0) return "plan";
         var parts = path.Split('/');
+        if (parts[^1] == "(order)") return $"order of the {PlanFields.Table.At(parts[0])?.Name ?? parts[0]}";
         var field = PlanFields.Table.At(path)?.Name;
         var item = parts.Length > 1 && PlanFields.Table.ItemsHaveIds(parts[0]) ? $"{parts[0]}/{parts[1]}" : null;
         if (item is null) return field ?? path;

@@ -8,6 +8,7 @@ using JointPlanner.Web.Start;
 using Microsoft.AspNetCore.Components;
 using Microsoft.AspNetCore.Components.Authorization;
 using Microsoft.EntityFrameworkCore;
+using Side = JointPlanner.Archive.Drafts.Take;
 
 namespace JointPlanner.Web.Rooms.Structure;
 
@@ -67,7 +68,7 @@ public sealed partial class StructurePage : IAsyncDisposable
         var draft = await Drafts.Open(person, Id);
         Take(draft.Text, isReadOnly: false);
         if (!RendererInfo.IsInteractive) return;
-        saver = new DraftSaver(Drafts, person, draft, Log);
+        saver = new DraftSaver(Drafts, person, draft, Follow, Log);
         bench!.Edited += saver.Note;
     }
 
@@ -85,15 +86,17 @@ public sealed partial class StructurePage : IAsyncDisposable
         bench = new Workbench(document, Desk.Known, Desk.Compute, isReadOnly);
     }
 
-    private async Task Reload()
+    // The page goes on with what the draft holds now: what others saved comes in, what was typed meanwhile stays.
+    private async Task<string> Follow(string before, string now)
     {
-        await Close();
-        bench = null;
-        // Parts hold the old bench: they go before the new one comes.
-        StateHasChanged();
-        await Task.Yield();
-        await Open();
-        sharedAgain++;
+        var typed = bench!.Document;
+        var merged = PlanMerge.Merge(before, typed.ToJson(), now);
+        if (merged.Clashes.Count > 0) merged = PlanMerge.Merge(before, typed.ToJson(), now, merged.Clashes.ToDictionary(c => c.Path, _ => Side.Mine));
+        if (PlanDocument.Parse(merged.Text).Document is not { } document || document.ToJson() == typed.ToJson()) return "";
+        var known = typed.Texts().ToHashSet();
+        var came = document.Texts().Count(text => !known.Contains(text));
+        await bench.Take(document, "what came from elsewhere");
+        return $"From elsewhere came {came} {(came == 1 ? "entry" : "entries")}.";
     }
 
     private async Task Close()

@@ -11,6 +11,7 @@ public sealed class Workbench : IDisposable
 {
     private readonly LiveCalculation<PlanDocument, Calculation> calculation;
     private readonly PlanHistory history;
+    private string unfoldedKey = "";
     private StepPrinter? printer;
     private (Result? Of, IReadOnlyDictionary<string, Engine.Formulas.Step>? Steps) keyed;
     private (IReadOnlyList<Engine.Formulas.Step>? Steps, DisplayProfile? Profile) printed;
@@ -72,6 +73,11 @@ public sealed class Workbench : IDisposable
     /// <summary>Writes a field's text as typed.</summary>
     public Task Write(string path, string? text) => Take(Document.With(path, text), path);
 
+    /// <summary>Whether the document has a place for a text at this path: a field of a plan, in an item that is still there.</summary>
+    public bool CanHold(string path) =>
+        PlanFields.Table.At(path) is { Entry: not (Exchange.Documents.GroupEntry or Exchange.Documents.ListEntry) }
+        && (path.Split('/') is not [var list, var item, _, ..] || PlanFields.Table.At(list) is not { Entry: Exchange.Documents.ListEntry } || Document.Items(list).Contains(item));
+
     /// <summary>Takes a changed document.</summary>
     /// <param name="document">The document.</param>
     /// <param name="act">What was changed, for undo.</param>
@@ -88,6 +94,7 @@ public sealed class Workbench : IDisposable
     /// <summary>Takes the last change back.</summary>
     public Task Undo()
     {
+        if (Undoable is null) return Task.CompletedTask;
         history.Undo();
         return Recompute();
     }
@@ -95,6 +102,7 @@ public sealed class Workbench : IDisposable
     /// <summary>Does it again.</summary>
     public Task Redo()
     {
+        if (Redoable is null) return Task.CompletedTask;
         history.Redo();
         return Recompute();
     }
@@ -106,6 +114,7 @@ public sealed class Workbench : IDisposable
     public void Unfold(int step)
     {
         Unfolded = Unfolded == step || step < 0 ? null : step;
+        unfoldedKey = Unfolded is { } open ? Result?.Steps[open].Key ?? "" : "";
         Changed?.Invoke();
     }
 
@@ -127,8 +136,8 @@ public sealed class Workbench : IDisposable
         if (await calculation.Newest(Document) is not { } outcome) return;
         Outcome = outcome;
         Drawn = outcome.Reading.Plan ?? Drawn;
-        // Steps are counted anew with each calculation: an open derivation would show another number's way.
-        if (Unfolded >= (Result?.Steps.Count ?? 0)) Unfolded = null;
+        // Steps are counted anew with each calculation: an open derivation follows its number, not its place.
+        if (Unfolded is not null) Unfolded = Find(unfoldedKey)?.Step;
         Changed?.Invoke();
     }
 }

@@ -19,7 +19,7 @@ public abstract class WorkbenchPart : ComponentBase, IDisposable
     protected DisplayProfile Profile => Preferences.Profile;
 
     /// <inheritdoc/>
-    public void Dispose()
+    public virtual void Dispose()
     {
         Bench.Changed -= Redraw;
         Preferences.Changed -= Redraw;
@@ -33,5 +33,6 @@ public abstract class WorkbenchPart : ComponentBase, IDisposable
         Preferences.Changed += Redraw;
     }
 
-    private void Redraw() => InvokeAsync(StateHasChanged);
+    /// <summary>Draws this part again.</summary>
+    protected void Redraw() => InvokeAsync(StateHasChanged);
 }

@@ -1,29 +1,27 @@
 using System.Globalization;
-using JointPlanner.Archive;
 using JointPlanner.Archive.Acts;
-using JointPlanner.Archive.Rights;
-using JointPlanner.Archive.Structures;
 using JointPlanner.Exchange.Plans;
 using JointPlanner.Web.Rooms.Structure;
 using JointPlanner.Web.Shared;
 using JointPlanner.Web.Shell;
 using Microsoft.AspNetCore.Components;
-using Microsoft.EntityFrameworkCore;
+using Microsoft.JSInterop;
 
 namespace JointPlanner.Web.Rooms.Structures;
 
 /// <summary>Begins a structure from few entries and leads to its ledger.</summary>
-public sealed partial class NewStructurePage
+public sealed partial class NewStructurePage : IDisposable
 {
     private static readonly IReadOnlyList<(string, string)> Decks = [("composite", "steel with concrete deck"), ("concrete", "concrete"), ("steel", "steel")];
-    private static readonly IReadOnlyList<(string, string)> Others = [("elastomeric", "elastomeric pads"), ("free", "sliding")];
-    private static readonly IReadOnlyList<(string, string)> Temperatures = [("effective", "of the structure"), ("shade", "of shade air")];
+    private static readonly IReadOnlyList<(string, string)> Others = [("free", "sliding"), ("elastomeric", "elastomeric pads")];
 
     // The press of the button carries this id: a second press gives the first answer.
-    private readonly Guid request = Guid.CreateVersion7();
+    private Guid request = Guid.CreateVersion7();
     private readonly PlanBeginning beginning = new();
+    private BeginningFaults faults = BeginningFaults.None;
     private string says = "";
-    private bool isWorking;
+    private PlanBeginning? judged;
+    private bool isWorking, choseCode, choseRules, wasPressed, leadsToFault;
 
     [Inject]
     private PlanDesk Desk { get; set; } = null!;
@@ -32,16 +30,16 @@ public sealed partial class NewStructurePage
     private Caller Caller { get; set; } = null!;
 
     [Inject]
-    private IDbContextFactory<ArchiveContext> Archive { get; set; } = null!;
-
-    [Inject]
-    private StructureRegister Register { get; set; } = null!;
+    private FirstDraft First { get; set; } = null!;
 
     [Inject]
     private NavigationManager Navigation { get; set; } = null!;
 
     [Inject]
     private Preferences Preferences { get; set; } = null!;
+
+    [Inject]
+    private IJSRuntime Script { get; set; } = null!;
 
     private bool IsUs => Preferences.Units == UnitProfile.Us;
 
@@ -55,25 +53,71 @@ public sealed partial class NewStructurePage
     private string FixedAt => beginning.FixedAt.ToString(CultureInfo.InvariantCulture);
 
     private IReadOnlyList<(string, string)> Places =>
-        [.. beginning.StationTexts.Select((s, i) => ((i + 1).ToString(CultureInfo.InvariantCulture), $"support {i + 1}, {s}"))];
+        [.. beginning.Marks.Select((mark, i) => ((i + 1).ToString(CultureInfo.InvariantCulture), $"{mark}, {beginning.StationTexts[i]}"))];
+
+    /// <inheritdoc/>
+    public void Dispose() => Preferences.Changed -= TurnUnits;
 
     /// <inheritdoc/>
     protected override void OnInitialized()
     {
-        beginning.Display = IsUs ? "us" : "metric";
-        beginning.Code = Codes.FirstOrDefault(c => c.Item1.EndsWith($"-{beginning.Display}", StringComparison.Ordinal), Codes[0]).Item1;
-        beginning.OwnerRules = Rules.FirstOrDefault(r => r.Item1.EndsWith(beginning.Display, StringComparison.Ordinal), Rules[0]).Item1;
+        Preferences.Changed += TurnUnits;
+        Offer();
     }
+
+    /// <inheritdoc/>
+    protected override async Task OnAfterRenderAsync(bool firstRender)
+    {
+        if (leadsToFault) await Script.InvokeVoidAsync("jointPlanner.focus", "form.beginning [aria-invalid=true]");
+        leadsToFault = false;
+        if (!firstRender) return;
+        beginning.Zone = await Script.InvokeAsync<string?>("jointPlanner.zone") ?? "";
+        // A page that lost its connection before "Begin" left its entries in this window.
+        foreach (var (path, text) in await Script.InvokeAsync<TypedEntry[]?>("jointPlanner.typed.left") ?? []) beginning.Put(path, text);
+        StateHasChanged();
+    }
+
+    private void TurnUnits()
+    {
+        Offer();
+        InvokeAsync(StateHasChanged);
+    }
+
+    // What goes with the units shown, until the person chooses something else.
+    private void Offer()
+    {
+        beginning.Display = IsUs ? "us" : "metric";
+        if (!choseCode) beginning.Code = Codes.FirstOrDefault(c => c.Item1.EndsWith($"-{beginning.Display}", StringComparison.Ordinal), Codes[0]).Item1;
+        if (!choseRules) beginning.OwnerRules = Rules.FirstOrDefault(r => r.Item1.EndsWith(beginning.Display, StringComparison.Ordinal), Rules[0]).Item1;
+    }
+
+    private void TakeCode(string code) => (beginning.Code, choseCode, beginning.ClimateZone) = (code, true, "");
+
+    private void TakeRules(string rules) => (beginning.OwnerRules, choseRules) = (rules, true);
 
     private void Fix(string word) => beginning.FixedAt = int.Parse(word, CultureInfo.InvariantCulture);
 
-    private Task Begin()
+    private async Task Begin()
     {
-        says = beginning.Name.Trim().Length == 0 ? "Name: it is empty. Give the structure a name."
-            : beginning.StationTexts.Count < 2
-                ? $"Stations of the supports: “{beginning.Stations}” names {beginning.StationTexts.Count}. Give at least two, each with its unit, separated by semicolons."
-                : "";
-        return says.Length > 0 ? Task.CompletedTask : Create(beginning.Name.Trim(), beginning.Zone, beginning.ToDocument());
+        wasPressed = true;
+        Judge();
+        if (faults.Count == 0) await BeginAnyway();
+        else (says, leadsToFault) = (string.Join(' ', ["Some entries are missing or cannot be read; each is told beside its field.", .. faults.Elsewhere]), true);
+    }
+
+    // From the first press on, what is wrong follows the typing.
+    private void Judge()
+    {
+        if (!wasPressed || judged == beginning) return;
+        judged = beginning with { };
+        faults = BeginningFaults.Of(beginning, Desk, Zones.Count > 0);
+        if (faults.Count == 0) says = "";
+    }
+
+    private async Task BeginAnyway()
+    {
+        if (beginning.Name.Trim().Length == 0) says = "Name: it is empty. Give the structure a name; everything else can wait.";
+        else await Create(beginning.Name.Trim(), beginning.Zone, beginning.ToDocument());
     }
 
     private Task BeginWith(PlanFile file)
@@ -85,24 +129,26 @@ public sealed partial class NewStructurePage
 
     private async Task Create(string name, string zone, PlanDocument plan)
     {
+        if (isWorking) return;
         (isWorking, says) = (true, "");
         try
         {
-            var call = await Caller.Now(request);
-            await using var scope = await ArchiveScope.Enter(Archive, call.PersonId);
-            foreach (var organisation in await scope.Organisations().OrderBy(o => o.Name).ToListAsync())
+            if (await First.Begin(await Caller.Now(request), name, zone, plan) is not { } made)
             {
-                if (!await scope.MayIn(Act.CreateStructure, organisation.Id)) continue;
-                var made = await Register.Create(call, new CreateRequest(organisation.Id, name, zone, plan.ToJson()));
-                Navigation.NavigateTo($"structures/{made.StructureId}");
+                says = "You may not begin structures in any organisation. Ask its owner for the role designer.";
                 return;
             }
 
-            says = "You may not begin structures in any organisation. Ask its owner for the role designer.";
+            await Script.InvokeVoidAsync("jointPlanner.typed.settle");
+            Navigation.NavigateTo($"structures/{made}");
         }
         catch (ActRefused refused)
         {
-            says = refused.Message;
+            (says, request) = (refused.Message, Guid.CreateVersion7());
+        }
+        catch (Exception problem) when (ArchiveSilence.Is(problem))
+        {
+            says = ArchiveSilence.Says;
         }
         finally
         {

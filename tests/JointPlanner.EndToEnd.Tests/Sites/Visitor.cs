@@ -2,7 +2,7 @@ using Deque.AxeCore.Commons;
 using Deque.AxeCore.Playwright;
 using Microsoft.Playwright;
 
-namespace JointPlanner.EndToEnd.Tests;
+namespace JointPlanner.EndToEnd.Tests.Sites;
 
 /// <summary>One browser window and everything that went wrong in it.</summary>
 public sealed class Visitor
