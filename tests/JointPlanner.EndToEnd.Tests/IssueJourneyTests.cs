@@ -1,4 +1,3 @@
-using JointPlanner.EndToEnd.Tests.Sites;
 using JointPlanner.Pdf.Verifying;
 
 namespace JointPlanner.EndToEnd.Tests;

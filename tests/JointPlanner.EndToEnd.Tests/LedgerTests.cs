@@ -1,6 +1,5 @@
 using System.Globalization;
 using System.Text.Json;
-using JointPlanner.EndToEnd.Tests.Sites;
 using Microsoft.Playwright;
 
 namespace JointPlanner.EndToEnd.Tests;

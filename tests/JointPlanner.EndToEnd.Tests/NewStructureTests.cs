@@ -1,5 +1,4 @@
 using System.Globalization;
-using JointPlanner.EndToEnd.Tests.Sites;
 using Microsoft.Playwright;
 
 namespace JointPlanner.EndToEnd.Tests;

@@ -1,4 +1,3 @@
-using JointPlanner.EndToEnd.Tests.Sites;
 using Microsoft.Playwright;
 
 [assembly: AssemblyFixture(typeof(Chromium))]

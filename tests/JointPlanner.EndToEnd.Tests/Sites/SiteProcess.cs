@@ -2,6 +2,13 @@ using System.Diagnostics;
 using System.Globalization;
 using System.Net;
 using System.Net.Sockets;
+using JointPlanner.Archive;
+using JointPlanner.Archive.Acts;
+using JointPlanner.Archive.People;
+using JointPlanner.Archive.Rights;
+using JointPlanner.Archive.Sqlite;
+using Microsoft.EntityFrameworkCore;
+using Microsoft.Extensions.DependencyInjection;
 
 namespace JointPlanner.EndToEnd.Tests.Sites;
 
@@ -45,6 +52,20 @@ public sealed class SiteProcess(Chromium chromium) : IAsyncDisposable
         await process.WaitForExitAsync();
         process.Dispose();
         process = null;
+    }
+
+    /// <summary>Makes the demo's checker a designer too. The site is not running meanwhile: the archive on one file has one user.</summary>
+    public async Task MakeCheckerDesigner()
+    {
+        await using var archive = new SqliteArchive(Path.Combine(folder.Path, "archive.db"));
+        await using var rooms = new ServiceCollection().AddArchive(archive).BuildServiceProvider();
+        var contexts = rooms.GetRequiredService<IDbContextFactory<ArchiveContext>>();
+        await using var context = await contexts.CreateDbContextAsync();
+        var person = await context.Users.SingleAsync(p => p.UserName == "checker");
+        var administrator = await context.Users.FirstAsync(p => p.Administrator);
+        await using var scope = await ArchiveScope.Enter(contexts, administrator.Id);
+        var organisation = await scope.Organisations().SingleAsync();
+        await rooms.GetRequiredService<OrganisationRegister>().SetRoles(ActCall.AtConsole(administrator.Id, TimeProvider.System.GetUtcNow()), organisation.Id, person.Id, [Role.Checker, Role.Designer]);
     }
 
     /// <summary>A fresh browser profile in which a demo person is signed in.</summary>

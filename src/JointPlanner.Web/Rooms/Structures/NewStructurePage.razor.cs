@@ -12,9 +12,6 @@ namespace JointPlanner.Web.Rooms.Structures;
 /// <summary>Begins a structure from few entries and leads to its ledger.</summary>
 public sealed partial class NewStructurePage : IDisposable
 {
-    private static readonly IReadOnlyList<(string, string)> Decks = [("composite", "steel with concrete deck"), ("concrete", "concrete"), ("steel", "steel")];
-    private static readonly IReadOnlyList<(string, string)> Others = [("free", "sliding"), ("elastomeric", "elastomeric pads")];
-
     // The press of the button carries this id: a second press gives the first answer.
     private Guid request = Guid.CreateVersion7();
     private readonly PlanBeginning beginning = new();
@@ -43,12 +40,11 @@ public sealed partial class NewStructurePage : IDisposable
 
     private bool IsUs => Preferences.Units == UnitProfile.Us;
 
-    private IReadOnlyList<(string, string)> Codes => [.. (Desk.Known.Bases ?? []).Select(b => (b.Id, b.Title))];
+    private IReadOnlyList<(string, string)> Codes => BeginningWords.Codes(Desk);
 
-    private IReadOnlyList<(string, string)> Rules => [.. Desk.RuleNames, ("", "none: movements only")];
+    private IReadOnlyList<(string, string)> Rules => BeginningWords.Rules(Desk);
 
-    private IReadOnlyList<(string, string)> Zones =>
-        Desk.Known.Bases?.FirstOrDefault(b => b.Id == beginning.Code)?.ClimateZones is { Count: > 0 } zones ? [("", "choose"), .. zones.Select(z => (z, z))] : [];
+    private IReadOnlyList<(string, string)> Zones => BeginningWords.Zones(Desk, beginning.Code);
 
     private string FixedAt => beginning.FixedAt.ToString(CultureInfo.InvariantCulture);
 
@@ -56,12 +52,12 @@ public sealed partial class NewStructurePage : IDisposable
         [.. beginning.Marks.Select((mark, i) => ((i + 1).ToString(CultureInfo.InvariantCulture), $"{mark}, {beginning.StationTexts[i]}"))];
 
     /// <inheritdoc/>
-    public void Dispose() => Preferences.Changed -= TurnUnits;
+    public void Dispose() => Preferences.Changed -= Offer;
 
     /// <inheritdoc/>
     protected override void OnInitialized()
     {
-        Preferences.Changed += TurnUnits;
+        Preferences.Changed += Offer;
         Offer();
     }
 
@@ -77,18 +73,13 @@ public sealed partial class NewStructurePage : IDisposable
         StateHasChanged();
     }
 
-    private void TurnUnits()
-    {
-        Offer();
-        InvokeAsync(StateHasChanged);
-    }
-
     // What goes with the units shown, until the person chooses something else.
     private void Offer()
     {
         beginning.Display = IsUs ? "us" : "metric";
         if (!choseCode) beginning.Code = Codes.FirstOrDefault(c => c.Item1.EndsWith($"-{beginning.Display}", StringComparison.Ordinal), Codes[0]).Item1;
         if (!choseRules) beginning.OwnerRules = Rules.FirstOrDefault(r => r.Item1.EndsWith(beginning.Display, StringComparison.Ordinal), Rules[0]).Item1;
+        InvokeAsync(StateHasChanged);
     }
 
     private void TakeCode(string code) => (beginning.Code, choseCode, beginning.ClimateZone) = (code, true, "");
