@@ -18,6 +18,7 @@ public sealed class LostConnectionTests(RunningSite site, Chromium chromium) : I
         await page.FillAsync(Skew, "21°");
         wire.Mend();
         await Assertions.Expect(page.Locator("#components-reconnect-modal")).ToBeHiddenAsync(new() { Timeout = 60_000 });
+        await Assertions.Expect(page.Locator($"{Station}[data-known='111 ft']")).ToHaveCountAsync(1);
         await Assertions.Expect(page.Locator($"{Skew}[data-known='21°']")).ToHaveCountAsync(1);
         await Assertions.Expect(page.Locator("[data-draft=saved]")).ToHaveTextAsync("draft saved");
         await page.ReloadAsync();
@@ -35,6 +36,8 @@ public sealed class LostConnectionTests(RunningSite site, Chromium chromium) : I
         wire.Cut();
         await Assertions.Expect(page.Locator(".reconnect-trying")).ToBeVisibleAsync();
         await page.FillAsync(Station, "181 ft");
+        // The old page shall not hand it over itself when it finds the wire mended: it is as if it had been closed.
+        await page.EvaluateAsync("() => { window.jointPlanner.typed.resend = () => {}; }");
         wire.Mend();
         await page.ReloadAsync();
         var unsent = page.Locator(".unsent");

@@ -28,7 +28,7 @@ public sealed class SilentArchiveTests(Chromium chromium)
         await writer.Page.ClickAsync("button:has-text('Save for all')");
         Assert.Equal("111 ft", await writer.Page.InputValueAsync(Station));
         await freezer.Page.ClickAsync("text=Freeze for checking");
-        await Assertions.Expect(freezer.Page.Locator("[role=alert]")).ToContainTextAsync("The archive does not answer");
+        await Assertions.Expect(freezer.Page.Locator("main [role=alert]").First).ToContainTextAsync("The archive does not answer");
         await Assertions.Expect(freezer.Page.Locator("h1 .state")).ToHaveTextAsync("a draft");
         await freezer.Page.ClickAsync("nav >> text=Structures");
         await Assertions.Expect(freezer.Page.Locator("h1")).ToHaveTextAsync("The archive does not answer");

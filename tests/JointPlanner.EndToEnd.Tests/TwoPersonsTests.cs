@@ -27,16 +27,19 @@ public sealed class TwoPersonsTests(Chromium chromium)
         await ada.Page.FillAsync(Skew, "20°");
         await milan.Page.FillAsync(Station, "115 ft");
         await milan.Page.FillAsync(Place, "Kestrel Lane, north end");
-        await Saved(ada);
-        await Saved(milan);
+        await Saved(ada, (Station, "110 ft"), (Skew, "20°"));
+        await Saved(milan, (Station, "115 ft"), (Place, "Kestrel Lane, north end"));
 
         await site.Kill();
+        await Assertions.Expect(ada.Page.Locator(".reconnect-trying")).ToBeVisibleAsync();
+        await Assertions.Expect(milan.Page.Locator(".reconnect-trying")).ToBeVisibleAsync();
         await site.Start();
         foreach (var person in new[] { ada, milan })
         {
             // The page finds the server again by itself.
-            await Assertions.Expect(person.Page.Locator("[data-draft=saved]")).ToBeVisibleAsync(new() { Timeout = 60_000 });
-            await Assertions.Expect(person.Page.Locator("#components-reconnect-modal")).ToBeHiddenAsync();
+            await Assertions.Expect(person.Page.Locator("#components-reconnect-modal")).ToBeHiddenAsync(new() { Timeout = 60_000 });
+            await Assertions.Expect(person.Page.Locator("[data-draft=saved]")).ToBeVisibleAsync();
+            await Assertions.Expect(person.Page.Locator(".unsent")).ToHaveCountAsync(0);
         }
 
         Assert.Equal(["110 ft", "20°"], await Values(ada, Station, Skew));
@@ -65,7 +68,12 @@ public sealed class TwoPersonsTests(Chromium chromium)
         Assert.Equal(["110 ft", "20°"], await Values(ada, Station, Skew));
     }
 
-    private static Task Saved(Visitor person) => Assertions.Expect(person.Page.Locator("[data-draft=saved]")).ToHaveTextAsync("draft saved");
+    // The server knows each entry, and all it knows is saved.
+    private static async Task Saved(Visitor person, params (string Field, string Text)[] entries)
+    {
+        foreach (var (field, text) in entries) await Assertions.Expect(person.Page.Locator($"{field}[data-known='{text}']")).ToHaveCountAsync(1);
+        await Assertions.Expect(person.Page.Locator("[data-draft=saved]")).ToHaveTextAsync("draft saved");
+    }
 
     private static Task SaveForAll(Visitor person) => person.Page.ClickAsync("button:has-text('Save for all')");
 

@@ -60,7 +60,7 @@ public sealed class Relay : IAsyncDisposable
         {
             while (true) _ = Carry(await on.AcceptTcpClientAsync(), on);
         }
-        catch (Exception cut) when (cut is SocketException or ObjectDisposedException)
+        catch (Exception cut) when (cut is SocketException or ObjectDisposedException or InvalidOperationException)
         {
             // The wire was cut.
         }

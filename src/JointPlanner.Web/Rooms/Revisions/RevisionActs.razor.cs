@@ -84,6 +84,13 @@ public sealed partial class RevisionActs
         {
             refusal = refused.Message;
         }
+        catch (Exception problem) when (ArchiveSilence.Is(problem))
+        {
+            // The next press carries the same id: what was done before the silence is not done twice.
+            await OnDone.InvokeAsync(ArchiveSilence.Says);
+            isWorking = false;
+            return;
+        }
 
         request = Guid.CreateVersion7();
         await OnDone.InvokeAsync(refusal);

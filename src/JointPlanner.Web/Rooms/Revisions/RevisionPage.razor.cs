@@ -69,7 +69,14 @@ public sealed partial class RevisionPage : IDisposable
     private async Task Done(string refusal)
     {
         says = refusal;
-        await Read();
+        try
+        {
+            await Read();
+        }
+        catch (Exception problem) when (ArchiveSilence.Is(problem))
+        {
+            says = ArchiveSilence.Says;
+        }
     }
 
     private void Redraw() => InvokeAsync(StateHasChanged);

@@ -98,6 +98,10 @@ public sealed partial class RecordForm
         {
             says = refused.Message;
         }
+        catch (Exception problem) when (ArchiveSilence.Is(problem))
+        {
+            says = ArchiveSilence.Says;
+        }
 
         isWorking = false;
     }
