@@ -25,7 +25,7 @@ public sealed class BeginningFaults
     internal static readonly BeginningFaults None = new([]);
 
     /// <summary>How many sentences there are in all.</summary>
-    internal int Count => byField.Sum(group => group.Count());
+    internal int Count => byField.SelectMany(group => group).Count();
 
     /// <summary>What belongs to one entry.</summary>
     internal IReadOnlyList<string> At(string field) => [.. byField[field].Take(2)];
