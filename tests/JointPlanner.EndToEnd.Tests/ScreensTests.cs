@@ -15,6 +15,7 @@ public sealed class ScreensTests(RunningSite site) : IClassFixture<RunningSite>
         new("/structures/{Id:guid}", "designer", "text=Tarn Moss Viaduct"),
         new("/revisions/{Id:guid}", "designer", "text=Tarn Moss Viaduct", "a.revision"),
         new("/verify", "designer"),
+        new("/people", "administrator"),
         new("/missing", "designer"),
         new("/status/{Code:int}", "designer") { Address = "/status/403" },
         new("/account/enter", null),
