@@ -38,20 +38,20 @@ public sealed class ScreensTests(RunningSite site) : IClassFixture<RunningSite>
         var before = visitor.Troubles.Count;
         var found = new List<string>();
         foreach (var paper in (string[])["light", "dark"])
-        foreach (var units in (string[])["metric", "us"])
-        {
-            await visitor.Page.Context.AddCookiesAsync([Cookie("paper", paper), Cookie("units", units)]);
-            await visitor.Page.SetViewportSizeAsync(1440, 1000);
-            await visitor.Go(address);
-            foreach (var width in (int[])[1440, 390])
+            foreach (var units in (string[])["metric", "us"])
             {
-                await visitor.Page.SetViewportSizeAsync(width, 900);
-                Assert.Equal(paper, await visitor.Page.EvaluateAsync<string>("document.documentElement.dataset.theme"));
-                found.AddRange((await visitor.Barriers()).Select(b => $"{paper} {units} {width}: {b}"));
-                var over = await visitor.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
-                if (over > 0) found.Add($"{paper} {units} {width}: {over} px wider than the screen");
+                await visitor.Page.Context.AddCookiesAsync([Cookie("paper", paper), Cookie("units", units)]);
+                await visitor.Page.SetViewportSizeAsync(1440, 1000);
+                await visitor.Go(address);
+                foreach (var width in (int[])[1440, 390])
+                {
+                    await visitor.Page.SetViewportSizeAsync(width, 900);
+                    Assert.Equal(paper, await visitor.Page.EvaluateAsync<string>("document.documentElement.dataset.theme"));
+                    found.AddRange((await visitor.Barriers()).Select(b => $"{paper} {units} {width}: {b}"));
+                    var over = await visitor.Page.EvaluateAsync<int>("document.documentElement.scrollWidth - document.documentElement.clientWidth");
+                    if (over > 0) found.Add($"{paper} {units} {width}: {over} px wider than the screen");
+                }
             }
-        }
 
         Assert.Empty(found);
         Assert.DoesNotContain(visitor.Troubles.Skip(before), trouble => !IsAnswerOf(screen, trouble));
