@@ -12,6 +12,7 @@ public sealed class Workbench : IDisposable
 {
     private readonly LiveCalculation<PlanDocument, Calculation> calculation;
     private readonly PlanHistory history;
+    private string unfoldedKey = "";
     private StepPrinter? printer;
     private (Result? Of, IReadOnlyDictionary<string, Step>? Steps) keyed;
     private (IReadOnlyList<Step>? Steps, DisplayProfile? Profile) printed;
