@@ -31,6 +31,16 @@ public class DimensionsTests
     }
 
     [Fact]
+    public void Only_plain_numbers_are_raised_to_any_power_or_have_a_logarithm()
+    {
+        Assert.Equal(Dimension.None, ToThe(Angle, 0.3).Dimension);
+        Assert.Throws<ArgumentException>(() => ToThe(Length, 0.3));
+        Assert.Throws<ArgumentException>(() => ToThe(Angle, Length));
+        Assert.Throws<ArgumentException>(() => Ln(Length));
+        Assert.Throws<ArgumentException>(() => Exp(Force));
+    }
+
+    [Fact]
     public void Only_an_angle_has_a_cosine()
     {
         Assert.Equal(Dimension.None, Cos(Angle).Dimension);

@@ -62,6 +62,22 @@ public class FormulaTests
     }
 
     [Fact]
+    public void Any_power_the_exponential_and_the_logarithm_are_those_of_mathematics()
+    {
+        Assert.Equal(3, Make([A, B], ToThe(A, B)).Compute(27, 1.0 / 3), 1e-12);
+        Assert.Equal(0.5, Make([A], ToThe(A, -0.5)).Compute(4), 1e-12);
+        Assert.Equal(Math.E, Make([A], Exp(A)).Compute(1), 1e-12);
+        Assert.Equal(1, Make([A], Ln(A)).Compute(Math.E), 1e-12);
+    }
+
+    [Fact]
+    public void A_formula_restated_keeps_its_expression_under_its_own_id_and_source()
+    {
+        var restated = Make([A, B], A / B).Restated("test.restated", Provenance.By("another document"));
+        Assert.Equal((0.5, "test.restated", "another document"), (restated.Compute(1, 2), restated.Id, restated.Source.Document));
+    }
+
+    [Fact]
     public void An_operand_that_is_not_listed_is_found_at_the_first_use() =>
         Assert.Throws<ArgumentException>(() => Make([A], A + B).Compute(1));
 

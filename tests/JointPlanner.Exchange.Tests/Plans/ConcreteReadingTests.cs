@@ -47,7 +47,7 @@ public sealed class ConcreteReadingTests
     [InlineData("\"area\": \"5.4 m2\",", "", "notional-size", "concrete.size")]
     [InlineData("\"area\": \"5.4 m2\",", "\"area\": \"5.4 m2\", \"notional-size\": \"0.5 m\",", "notional-size", "concrete.size")]
     [InlineData("\"humidity\": \"75 %\"", "\"humidity\": 75", "humidity", "field.range")]
-    [InlineData("\"curing-end\": \"2 d\"", "\"curing-end\": \"2\"", "curing-end", "quantity.no-unit")]
+    [InlineData("\"curing-end\": \"2 d\"", "\"curing-end\": \"2\"", "curing-end", "quantity.bare-number")]
     [InlineData("\"model\": \"fib-mc-2010\"", "\"model\": \"fib-mc-2011\"", "model", "field.unknown-word")]
     [InlineData("\"end-of-life\": \"80 a\"", "\"end-of-life\": \"1 a\"", "stages/#2/age", "")]
     [InlineData("\"age\": \"40 d\"", "\"age\": \"90 a\"", "stages/#2/age", "concrete.after-end-of-life")]

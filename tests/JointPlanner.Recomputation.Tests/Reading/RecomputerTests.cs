@@ -47,6 +47,10 @@ public class RecomputerTests
              k = √(G² / s²) − cos(0) / 2
                = √((115.0 mm [10])² / (5.0 mm [9])²) − cos(60.00°) · 2
                = 22.000
+        [12] p: what grows with any power
+             p = γ^0.5 · exp(−γ) / ln(γ)
+               = (1.200 [6])^0.5 · exp(−1 · 1.200 [6]) / ln(1.200 [6])
+               = 1.810
         """;
 
     [Fact]
@@ -70,6 +74,10 @@ public class RecomputerTests
     [InlineData("√((115.0 mm [10])²", "√((115.0 mm [10])³", "no square root")]
     [InlineData("(115.0 mm [10])²", "(115.0 mm [10])", "no square root")]
     [InlineData(" · 2\n", " ÷ 2\n", "cannot read")]
+    [InlineData("(1.200 [6])^0.5", "(1.200 [6])^0.6", "the line gives")]
+    [InlineData("(1.200 [6])^0.5", "(5.0 mm [9])^0.5", "is no plain number")]
+    [InlineData("exp(−1 ·", "exp(−2 ·", "the line gives")]
+    [InlineData("ln(1.200 [6])", "ln(5.0 mm [9])", "is no plain number")]
     [InlineData("[9] s: step", "[1] s: step", "stands twice")]
     public void Each_alteration_is_found(string sound, string altered, string complaint)
     {

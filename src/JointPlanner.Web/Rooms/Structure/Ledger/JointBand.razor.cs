@@ -8,6 +8,8 @@ namespace JointPlanner.Web.Rooms.Structure.Ledger;
 /// <summary>The joints: what moves each, what fits it, how it is set, what it lies between.</summary>
 public sealed partial class JointBand
 {
+    private static readonly string[] Shortenings = ["creep", "shrinkage", "concrete"];
+
     private IReadOnlyList<Cause> causes = [], shownCauses = [];
     private bool areCausesShown;
 
@@ -29,7 +31,7 @@ public sealed partial class JointBand
     // Ages are asked for only where a deck at the joint shortens.
     private IEnumerable<string> Shortening(string path) => ((string[])["near", "far"]).Where(side =>
         Bench.Document.Has($"{path}/setting/{side}-deck-age")
-        || (Bench.Document.TextAt($"{path}/{side}") is { } body && new[] { "creep", "shrinkage", "concrete" }.Any(word => Bench.Document.Has($"segments/{body}/{word}"))));
+        || (Bench.Document.TextAt($"{path}/{side}") is { } body && Shortenings.Any(word => Bench.Document.Has($"segments/{body}/{word}"))));
 
     private Task Add() => Bench.Take(PlanParts.WithJoint(Bench.Document, Bench.UsedIds("joints")), "joints");
 }
