@@ -7,6 +7,7 @@ using JointPlanner.Web.Rooms.Structure;
 using JointPlanner.Web.Rooms.Structures;
 using JointPlanner.Web.Shell;
 using JointPlanner.Web.Start;
+using Microsoft.AspNetCore.SignalR;
 using MudBlazor.Services;
 
 var builder = WebApplication.CreateBuilder(args);
@@ -14,7 +15,8 @@ var refusals = Refusals.Before(builder.Configuration, builder.Environment);
 if (refusals.Count > 0) return Stop(refusals);
 
 builder.WebHost.ConfigureKestrel(kestrel => kestrel.Limits.MaxRequestBodySize = 1 << 20);
-builder.Services.AddRazorComponents().AddInteractiveServerComponents(Circuits.Configure);
+builder.Services.AddRazorComponents().AddInteractiveServerComponents(Circuits.Configure)
+    .AddHubOptions(hub => hub.AddFilter(new CircuitsPerAddress(builder.Configuration.GetValue("Circuits:PerAddress", CircuitsPerAddress.Usual))));
 builder.Services.AddMudServices();
 builder.Services.AddHealthChecks();
 builder.Services.AddHttpContextAccessor();
@@ -57,11 +59,12 @@ app.UseRateLimiter();
 app.UseAuthorization();
 app.UseMiddleware<TooLarge>();
 app.UseAntiforgery();
-app.MapStaticAssets();
-app.MapHealthChecks("/health");
+app.MapStaticAssets().AllowAnonymous();
+app.MapHealthChecks("/health").AllowAnonymous();
 app.MapAccounts();
 app.MapSheets();
-app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
+app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null)
+    .OpenMachinery();
 try
 {
     await app.ReadyArchive();

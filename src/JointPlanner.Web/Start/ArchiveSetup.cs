@@ -29,7 +29,7 @@ internal static class ArchiveSetup
         services.AddIdentityCore<Person>(Accounts).AddEntityFrameworkStores<ArchiveContext>().AddSignInManager().AddDefaultTokenProviders();
         services.AddScoped<IUserClaimsPrincipalFactory<Person>, PersonClaims>();
         services.AddAuthentication(IdentityConstants.ApplicationScheme).AddIdentityCookies();
-        services.AddAuthorization();
+        services.AddDoors();
         services.AddScoped<AuthenticationStateProvider, StillWelcome>();
         services.Configure<SecurityStampValidatorOptions>(options =>
         {

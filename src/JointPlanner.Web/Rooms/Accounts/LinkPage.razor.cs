@@ -1,6 +1,7 @@
 using JointPlanner.Archive.Acts;
 using JointPlanner.Archive.People;
 using Microsoft.AspNetCore.Components;
+using Microsoft.AspNetCore.Diagnostics;
 using Microsoft.AspNetCore.Identity;
 
 namespace JointPlanner.Web.Rooms.Accounts;
@@ -44,6 +45,8 @@ public sealed partial class LinkPage
         }
         catch (NotFound)
         {
+            // This page says it itself.
+            if (Context.Features.Get<IStatusCodePagesFeature>() is { } pages) pages.Enabled = false;
             Context.Response.StatusCode = StatusCodes.Status404NotFound;
         }
     }
