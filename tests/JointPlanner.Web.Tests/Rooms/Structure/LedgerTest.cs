@@ -58,13 +58,20 @@ public abstract class LedgerTest : MudTest
 
     protected void Open(PlanDocument document, bool isReadOnly = false) => Bench = new Workbench(document, Desk.Known, Desk.Compute, isReadOnly);
 
-    /// <summary>Types into a field as a person does. On the renderer's own thread: an entry made while a result is being drawn would meet a handler that is just being replaced.</summary>
-    protected static void Type<TPart>(IRenderedComponent<TPart> cut, string path, string text)
-        where TPart : IComponent => cut.InvokeAsync(() => cut.Find($"input[data-path='{path}']").Input(text)).GetAwaiter().GetResult();
+    /// <summary>Types into a field as a person does. An entry that meets a handler which is just being replaced by a redraw is lost here, though not in a browser: it is made again until the document holds it.</summary>
+    protected void Type<TPart>(IRenderedComponent<TPart> cut, string path, string text)
+        where TPart : IComponent => Enter(cut, path, text, () => cut.Find($"input[data-path='{path}']").Input(text));
 
     /// <summary>Chooses in a field with fixed words.</summary>
-    protected static void Choose<TPart>(IRenderedComponent<TPart> cut, string path, string word)
-        where TPart : IComponent => cut.InvokeAsync(() => cut.Find($"select[data-path='{path}']").Change(word)).GetAwaiter().GetResult();
+    protected void Choose<TPart>(IRenderedComponent<TPart> cut, string path, string word)
+        where TPart : IComponent => Enter(cut, path, word, () => cut.Find($"select[data-path='{path}']").Change(word));
+
+    private void Enter<TPart>(IRenderedComponent<TPart> cut, string path, string text, Action act)
+        where TPart : IComponent => cut.WaitForAssertion(() =>
+        {
+            if (Bench.Document.TextAt(path) != text) act();
+            Assert.Equal(text, Bench.Document.TextAt(path));
+        });
 
     /// <summary>What stands beside a field once it is there.</summary>
     protected static IElement Beside<TPart>(IRenderedComponent<TPart> cut, string path, string kind = ".fault")

@@ -79,6 +79,7 @@ public sealed class WrongInputTests : LedgerTest
         Type(cut, "segments/deck/end", "680.6 m");
         Type(cut, "supports/a4/station", "680 m");
         Type(cut, "supports/p3/station", "643 m");
+        cut.WaitForAssertion(() => Assert.Equal(643, Bench.Outcome.Reading.Plan?.Supports[2].Station));
         var says = Words(Beside(cut, "supports/p3/station", ".doubt"));
         Assert.Contains("the deck spans 601 m", says, StringComparison.Ordinal);
         Assert.Contains("Usual for a girder deck: up to 500 m.", says, StringComparison.Ordinal);
