@@ -29,12 +29,12 @@ public sealed class WrongSignatureTests(RunningSite site) : IClassFixture<Runnin
         await Refused(designer, "expired on", "Sign with a renewed certificate.");
 
         await HandIn(designer, revision, Written("foreign.pdf", ForeignPdf()));
-        await Refused(designer, "The upload differs from the archived file from byte ", "A signature must be appended to the archived file");
+        await Refused(designer, "The signed document does not begin with the archived sheet, byte for byte.", "a program that only appends a signature");
 
         var changed = sheet.ToArray();
         changed[1000] ^= 1;
         await HandIn(designer, revision, Written("changed.pdf", changed));
-        await Refused(designer, "The upload differs from the archived file from byte 1000 on.", "a program that rewrites the file cannot be used");
+        await Refused(designer, "The signed document does not begin with the archived sheet, byte for byte.", "a program that only appends a signature");
 
         Assert.Equal(sheet, await Sheet(designer, revision));
         await Sign(designer, revision, site.KeyFile("designer"), site.Password("designer"));

@@ -28,8 +28,8 @@ public sealed class Relay : IAsyncDisposable
         {
             foreach (var end in open)
             {
-                // Lingering for nothing sends a reset: a cut, not a farewell.
-                end.LingerState = new LingerOption(true, 0);
+                // Closing without waiting sends a reset: a cut, not a farewell. An end that has gone by itself has no socket left.
+                end.Client?.Close(0);
                 end.Dispose();
             }
 

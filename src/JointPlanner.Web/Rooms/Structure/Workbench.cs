@@ -12,7 +12,6 @@ public sealed class Workbench : IDisposable
 {
     private readonly LiveCalculation<PlanDocument, Calculation> calculation;
     private readonly PlanHistory history;
-    private string unfoldedKey = "";
     private StepPrinter? printer;
     private (Result? Of, IReadOnlyDictionary<string, Step>? Steps) keyed;
     private (IReadOnlyList<Step>? Steps, DisplayProfile? Profile) printed;
