@@ -65,7 +65,9 @@ public sealed class AashtoLrfd7UsLoadsTests
     {
         var section = new CrossSection
         {
-            Depth = 60 * Inch, BearingDepth = 60 * Inch, Surfacing = 6 * Inch,
+            Depth = 60 * Inch,
+            BearingDepth = 60 * Inch,
+            Surfacing = 6 * Inch,
             Layers = [new Layer { Id = "girder", Material = LayerMaterial.Steel, Modulus = 29_000 * Ksi, Area = 0.06, Depth = 30 * Inch, Inertia = 80_000 * Math.Pow(Inch, 4) }],
         };
         var plan = new Plan

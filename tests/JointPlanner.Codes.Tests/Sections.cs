@@ -12,11 +12,17 @@ internal static class Sections
     {
         var segment = new Segment
         {
-            Id = "deck", Start = 0, End = 40, Kind = kind, AxialStiffness = 1,
+            Id = "deck",
+            Start = 0,
+            End = 40,
+            Kind = kind,
+            AxialStiffness = 1,
             Gradient = new Gradient { Zone = "1", Surface = surface },
             Section = new CrossSection
             {
-                Depth = depth, BearingDepth = depth, Surfacing = surfacing,
+                Depth = depth,
+                BearingDepth = depth,
+                Surfacing = surfacing,
                 Layers = [new Layer { Id = "all", Material = LayerMaterial.Steel, Modulus = 1e9, Area = 10, Depth = 0.4 * depth, Inertia = 10 }],
             },
         };

@@ -28,31 +28,6 @@ public sealed class LostConnectionTests(RunningSite site, Chromium chromium) : I
         await Assertions.Expect(page.Locator(".unsent")).ToHaveCountAsync(0);
     }
 
-    [Fact]
-    public async Task What_was_typed_without_a_wire_is_offered_again_by_a_new_page()
-    {
-        await using var wire = new Relay(site.Address);
-        var page = await Edit(wire, "Plover Flats Bridge");
-        wire.Cut();
-        await Assertions.Expect(page.Locator(".reconnect-trying")).ToBeVisibleAsync();
-        await page.FillAsync(Station, "181 ft");
-        // The old page shall not hand it over itself when it finds the wire mended: it is as if it had been closed.
-        await page.EvaluateAsync("() => { window.jointPlanner.typed.resend = () => {}; }");
-        wire.Mend();
-        await page.ReloadAsync();
-        var unsent = page.Locator(".unsent");
-        await Assertions.Expect(unsent.Locator("tbody tr")).ToHaveTextAsync("Pier 2: station of the support\t181 ft\t180 ft", new() { UseInnerText = true });
-        Assert.Equal("180 ft", await page.InputValueAsync(Station));
-        await unsent.Locator("text=Put what I typed in").ClickAsync();
-        await Assertions.Expect(page.Locator(Station)).ToHaveValueAsync("181 ft");
-        await Assertions.Expect(unsent).ToHaveCountAsync(0);
-        await Assertions.Expect(page.Locator("[data-draft=saved]")).ToHaveTextAsync("draft saved");
-        await page.ReloadAsync();
-        await page.WaitForSelectorAsync("[data-draft]");
-        Assert.Equal("181 ft", await page.InputValueAsync(Station));
-        await Assertions.Expect(unsent).ToHaveCountAsync(0);
-    }
-
     private async Task<IPage> Edit(Relay wire, string structure)
     {
         var visitor = await chromium.Visit(wire.Address);

@@ -30,7 +30,10 @@ internal static class TemperatureGradients
 
     private static readonly ImmutableDictionary<string, (double T1, double T2)> Zones = new Dictionary<string, (double, double)>
     {
-        ["1"] = (54, 14), ["2"] = (46, 12), ["3"] = (41, 11), ["4"] = (38, 9),
+        ["1"] = (54, 14),
+        ["2"] = (46, 12),
+        ["3"] = (41, 11),
+        ["4"] = (38, 9),
     }.ToImmutableDictionary();
 
     /// <summary>The two profiles of a deck.</summary>

@@ -10,7 +10,12 @@ public sealed class Aci209ModelTests : CreepModelSpecification
 
     private static Concrete Member => new()
     {
-        Source = "test", Strength = 5 * Ksi, CuringEnd = 7 * Day, Humidity = 0.40, Size = new VolumeToSurface(1.5 * Inch), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 5 * Ksi,
+        CuringEnd = 7 * Day,
+        Humidity = 0.40,
+        Size = new VolumeToSurface(1.5 * Inch),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>

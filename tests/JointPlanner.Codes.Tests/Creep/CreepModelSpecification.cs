@@ -17,7 +17,12 @@ public abstract class CreepModelSpecification
     /// <summary>A concrete within the model's limits.</summary>
     protected virtual Concrete Ordinary => new()
     {
-        Source = "test", Strength = 40 * Mpa, CuringEnd = 3 * Day, Humidity = 0.7, Size = new NotionalSize(Thickness), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 40 * Mpa,
+        CuringEnd = 3 * Day,
+        Humidity = 0.7,
+        Size = new NotionalSize(Thickness),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>An ordinary notional size, m.</summary>

@@ -14,7 +14,12 @@ public sealed class En1992Part1To1Of2004ModelTests : CreepModelSpecification
     /// <summary>The slab of the JRC composite twin-girder deck: C35/45, class N, 80 %, 3.9 m² with 11.6 m exposed, drying from one day.</summary>
     private static Concrete JrcSlab => new()
     {
-        Source = "test", Strength = 35 * Mpa, CuringEnd = Day, Humidity = 0.8, Size = new SectionSize(3.9, 11.6), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 35 * Mpa,
+        CuringEnd = Day,
+        Humidity = 0.8,
+        Size = new SectionSize(3.9, 11.6),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>

@@ -11,7 +11,12 @@ public sealed class En1992Part1To1Of2023ModelTests : CreepModelSpecification
 
     private static Concrete Slab => new()
     {
-        Source = "test", Strength = 35 * Mpa, CuringEnd = Day, Humidity = 0.8, Size = new SectionSize(3.9, 11.6), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 35 * Mpa,
+        CuringEnd = Day,
+        Humidity = 0.8,
+        Size = new SectionSize(3.9, 11.6),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>Published: an open-source finite-element library's verification file to the 2021 draft of EN 1992-1-1 (seen).</summary>

@@ -12,7 +12,13 @@ public abstract class From2005ModelTests : CreepModelSpecification
     /// <summary>72 in bulb-tee: 5.8 ksi at transfer, 70 %, volume over surface about 3.0 in, steam-cured for a day.</summary>
     protected static Concrete BulbTee => new()
     {
-        Source = "test", Strength = 6.5 * Ksi, TransferStrength = 5.8 * Ksi, Curing = Curing.Steam, CuringEnd = Day, Humidity = 0.70, Size = new VolumeToSurface(3.0 * Inch),
+        Source = "test",
+        Strength = 6.5 * Ksi,
+        TransferStrength = 5.8 * Ksi,
+        Curing = Curing.Steam,
+        CuringEnd = Day,
+        Humidity = 0.70,
+        Size = new VolumeToSurface(3.0 * Inch),
         EndOfLife = 100 * Year,
     };
 

@@ -59,6 +59,12 @@ public sealed class JointsOfConcreteDecksTests
 
     private static Concrete Concrete(double strength, double size, double humidity, double cured, params StressStage[] stages) => new()
     {
-        Source = "test", Strength = strength * Mpa, CuringEnd = cured * Day, Humidity = humidity, Size = new NotionalSize(size), EndOfLife = 36500 * Day, Stages = [.. stages],
+        Source = "test",
+        Strength = strength * Mpa,
+        CuringEnd = cured * Day,
+        Humidity = humidity,
+        Size = new NotionalSize(size),
+        EndOfLife = 36500 * Day,
+        Stages = [.. stages],
     };
 }

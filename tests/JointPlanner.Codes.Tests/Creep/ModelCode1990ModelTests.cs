@@ -10,7 +10,12 @@ public sealed class ModelCode1990ModelTests : CreepModelSpecification
 
     private static Concrete Member(double humidity, double size) => new()
     {
-        Source = "test", Strength = 30 * Mpa, CuringEnd = 0, Humidity = humidity, Size = new NotionalSize(size * Mm), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 30 * Mpa,
+        CuringEnd = 0,
+        Humidity = humidity,
+        Size = new NotionalSize(size * Mm),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>From memory, check against the licensed text: CEB-FIP Model Code 1990, table 2.1.11, shrinkage after 70 years, per mille, f_cm 38 MPa.</summary>

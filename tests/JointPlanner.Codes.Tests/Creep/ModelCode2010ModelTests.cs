@@ -11,7 +11,12 @@ public sealed class ModelCode2010ModelTests : CreepModelSpecification
 
     private static Concrete Slab => new()
     {
-        Source = "test", Strength = 35 * Mpa, CuringEnd = Day, Humidity = 0.8, Size = new SectionSize(3.9, 11.6), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 35 * Mpa,
+        CuringEnd = Day,
+        Humidity = 0.8,
+        Size = new SectionSize(3.9, 11.6),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>Regression check, own arithmetic, not published.</summary>

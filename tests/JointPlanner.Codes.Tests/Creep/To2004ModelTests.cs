@@ -17,7 +17,12 @@ public sealed class To2004ModelTests : CreepModelSpecification
     /// <summary>13 020 in³ and 2 955.38 in² per foot, 6.0 ksi.</summary>
     private static Concrete Girder => new()
     {
-        Source = "test", Strength = 6 * Ksi, CuringEnd = Day, Humidity = 0.70, Size = new VolumeToSurface(13020 / 2955.38 * Inch), EndOfLife = 100 * Year,
+        Source = "test",
+        Strength = 6 * Ksi,
+        CuringEnd = Day,
+        Humidity = 0.70,
+        Size = new VolumeToSurface(13020 / 2955.38 * Inch),
+        EndOfLife = 100 * Year,
     };
 
     /// <summary>Published: FHWA prestressed-girder design example, Appendix C, step C1.2 (seen).</summary>

@@ -49,6 +49,8 @@ public sealed class RunningSite(Chromium chromium) : WebApplicationFactory<Progr
     {
         builder.UseEnvironment("Development");
         builder.UseSetting("Demo:Enabled", "true");
+        // All browsers of a class come from one address.
+        builder.UseSetting("Circuits:PerAddress", "500");
         builder.UseSetting("urls", "http://127.0.0.1:0");
         builder.UseSetting("Archive:Folder", folder.Path);
     }

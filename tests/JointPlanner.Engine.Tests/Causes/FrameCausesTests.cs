@@ -82,7 +82,8 @@ public sealed class FrameCausesTests
         {
             LiveLoad = new LiveLoad
             {
-                StandsFor = FrameShare.WholeWidth, Lanes = 2,
+                StandsFor = FrameShare.WholeWidth,
+                Lanes = 2,
                 Own = new OwnLoads([new OwnTrain("axle", [new OwnAxle(500e3, 0, null)])], 10e3, 1.3, "test"),
             },
         };

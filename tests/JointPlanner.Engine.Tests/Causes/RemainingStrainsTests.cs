@@ -150,7 +150,13 @@ public class RemainingStrainsTests
 
     private static Concrete Concrete(params StressStage[] stages) => new()
     {
-        Source = "test", Strength = 40 * Mpa, CuringEnd = 3 * Day, Humidity = 0.7, Size = new NotionalSize(0.4), EndOfLife = 10000 * Day, Stages = [.. stages],
+        Source = "test",
+        Strength = 40 * Mpa,
+        CuringEnd = 3 * Day,
+        Humidity = 0.7,
+        Size = new NotionalSize(0.4),
+        EndOfLife = 10000 * Day,
+        Stages = [.. stages],
     };
 
     private sealed class QuietBasis(CreepModel? own) : CodeBasis

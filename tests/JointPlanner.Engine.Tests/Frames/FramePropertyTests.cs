@@ -134,7 +134,8 @@ public sealed class FramePropertyTests
         {
             LiveLoad = new LiveLoad
             {
-                StandsFor = FrameShare.WholeWidth, Lanes = 1,
+                StandsFor = FrameShare.WholeWidth,
+                Lanes = 1,
                 Own = new OwnLoads([new OwnTrain("t", [new OwnAxle(100e3, 0, null), new OwnAxle(150e3, 4, 9)])], 9e3, 1, "test"),
             },
         };

@@ -68,13 +68,26 @@ public sealed record PlanBeginning
     /// <summary>The same with something in each empty place that a computation needs only to begin, so that it finds what else is missing.</summary>
     public PlanBeginning Completed() => this with
     {
-        Name = Or(Name, "name"), Number = Or(Number, "number"), Place = Or(Place, "place"), SettingTemperature = Or(SettingTemperature, "10 °C"),
+        Name = Or(Name, "name"),
+        Number = Or(Number, "number"),
+        Place = Or(Place, "place"),
+        SettingTemperature = Or(SettingTemperature, "10 °C"),
     };
 
     /// <summary>The same with something in each place that the drawing does not need, so that it can be drawn before all is typed.</summary>
     public PlanBeginning ForDrawing() => this with
     {
-        Name = "drawing", Number = "drawing", Place = "drawing", SettingTemperature = "10 °C", OtherBearings = "free", Skew = "", Shrinkage = "", ClimateZone = "", Lowest = "", Highest = "", Zone = "",
+        Name = "drawing",
+        Number = "drawing",
+        Place = "drawing",
+        SettingTemperature = "10 °C",
+        OtherBearings = "free",
+        Skew = "",
+        Shrinkage = "",
+        ClimateZone = "",
+        Lowest = "",
+        Highest = "",
+        Zone = "",
     };
 
     /// <summary>Puts a text back into the entry of the page that it was typed into.</summary>

@@ -9,7 +9,7 @@ namespace JointPlanner.Web.Tests.Rooms.Structure;
 /// <summary>Units are a way of looking: what was typed never changes with them.</summary>
 public sealed class UnitsShownTests : LedgerTest
 {
-    public UnitsShownTests() => this.AddAuthorization();
+    public UnitsShownTests() => AddAuthorization();
 
     [Theory]
     [InlineData(Composite)]
