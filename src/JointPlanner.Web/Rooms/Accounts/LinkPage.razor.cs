@@ -1,7 +1,6 @@
 using JointPlanner.Archive.Acts;
 using JointPlanner.Archive.People;
 using Microsoft.AspNetCore.Components;
-using Microsoft.AspNetCore.Diagnostics;
 using Microsoft.AspNetCore.Identity;
 
 namespace JointPlanner.Web.Rooms.Accounts;
@@ -45,9 +44,12 @@ public sealed partial class LinkPage
         }
         catch (NotFound)
         {
-            // This page says it itself.
-            if (Context.Features.Get<IStatusCodePagesFeature>() is { } pages) pages.Enabled = false;
-            Context.Response.StatusCode = StatusCodes.Status404NotFound;
+            // This page says it itself. A status set now would make the renderer leave the page out, for the general page to stand in.
+            Context.Response.OnStarting(() =>
+            {
+                Context.Response.StatusCode = StatusCodes.Status404NotFound;
+                return Task.CompletedTask;
+            });
         }
     }
 
